@@ -1,0 +1,77 @@
+package io.github.gammawright.graph;
+
+import java.util.List;
+import org.hipparchus.fraction.BigFraction;
+
+/** One step of a {@link StraightLineProgram}; operands are the numbers of earlier instructions. */
+public sealed interface Instruction {
+
+    /** The numbers of the instructions whose values this one uses, in their order. */
+    List<Integer> operands();
+
+    /** A value given to the evaluation. */
+    record Load(Symbol symbol) implements Instruction {
+        @Override
+        public List<Integer> operands() {
+            return List.of();
+        }
+    }
+
+    /** An exact rational number. */
+    record Constant(BigFraction value) implements Instruction {
+        @Override
+        public List<Integer> operands() {
+            return List.of();
+        }
+    }
+
+    /** The circle's constant. */
+    record Pi() implements Instruction {
+        @Override
+        public List<Integer> operands() {
+            return List.of();
+        }
+    }
+
+    /** A binary operation. */
+    record Arithmetic(Operator operator, int left, int right) implements Instruction {
+        @Override
+        public List<Integer> operands() {
+            return List.of(left, right);
+        }
+    }
+
+    /** The negative of a value; it counts as no operation. */
+    record Negation(int operand) implements Instruction {
+        @Override
+        public List<Integer> operands() {
+            return List.of(operand);
+        }
+    }
+
+    /** A function applied to its arguments. */
+    record Call(RealFunction function, List<Integer> operands) implements Instruction {
+        public Call {
+            operands = List.copyOf(operands);
+        }
+    }
+
+    /** The binary operations. */
+    enum Operator {
+        ADD("+"),
+        SUBTRACT("-"),
+        MULTIPLY("*"),
+        DIVIDE("/");
+
+        private final String symbol;
+
+        Operator(String symbol) {
+            this.symbol = symbol;
+        }
+
+        /** The operator as Java writes it. */
+        public String symbol() {
+            return symbol;
+        }
+    }
+}

@@ -1,0 +1,2 @@
+/** Benchmarks of kernels, and the comparison of metric choices. */
+package io.github.gammawright.benchmarks;

@@ -1,0 +1,2 @@
+/** Scenarios that run on kernels made by the plugin in this build. */
+package io.github.gammawright.samples;

@@ -1,0 +1,2 @@
+/** The commands of the program {@code gammawright}. */
+package io.github.gammawright.commandline;

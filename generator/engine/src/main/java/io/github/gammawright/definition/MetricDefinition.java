@@ -73,8 +73,7 @@ public record MetricDefinition(
      * @param of the coordinates it depends on, in declared order
      * @param sample an expression in these coordinates and the parameters that checks use in its place
      */
-    public record CallerFunction(
-            String name, List<String> of, Optional<Expression> sample, SourcePosition position) {
+    public record CallerFunction(String name, List<String> of, Optional<Expression> sample, SourcePosition position) {
 
         public CallerFunction {
             of = List.copyOf(of);
@@ -82,7 +81,8 @@ public record MetricDefinition(
     }
 
     /** A comparison chain {@code e0 < e1 <= e2 …}; it holds when every comparison in it does, and never for NaN. */
-    public record Condition(List<Expression> operands, List<Comparison> comparisons, String text, SourcePosition position) {
+    public record Condition(
+            List<Expression> operands, List<Comparison> comparisons, String text, SourcePosition position) {
 
         public Condition {
             operands = List.copyOf(operands);
@@ -148,7 +148,12 @@ public record MetricDefinition(
         /** No claim at all. */
         public static Claims none() {
             return new Claims(
-                    Optional.empty(), Optional.empty(), Optional.empty(), Optional.empty(), Optional.empty(), List.of());
+                    Optional.empty(),
+                    Optional.empty(),
+                    Optional.empty(),
+                    Optional.empty(),
+                    Optional.empty(),
+                    List.of());
         }
     }
 

@@ -23,8 +23,7 @@ public sealed interface MetricForm {
      * @param shift the contravariant β^i, one for each coordinate but the first
      * @param spatialLineElement γ as a quadratic form in the differentials of the coordinates but the first
      */
-    record ThreePlusOne(Expression lapse, List<Expression> shift, Expression spatialLineElement)
-            implements MetricForm {
+    record ThreePlusOne(Expression lapse, List<Expression> shift, Expression spatialLineElement) implements MetricForm {
 
         public ThreePlusOne {
             shift = List.copyOf(shift);

@@ -70,8 +70,7 @@ public record KernelModel(
      * @param comparisons one fewer than the operands
      * @param text as the author wrote it
      */
-    public record Condition(
-            List<Integer> operands, List<MetricDefinition.Comparison> comparisons, String text) {
+    public record Condition(List<Integer> operands, List<MetricDefinition.Comparison> comparisons, String text) {
 
         public Condition {
             operands = List.copyOf(operands);

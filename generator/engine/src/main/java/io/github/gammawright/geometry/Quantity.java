@@ -74,8 +74,7 @@ public enum Quantity {
             case METRIC, INVERSE_METRIC -> new Shape(List.of(n, n), 0, true);
             case VOLUME_ELEMENT -> new Shape(List.of(), 0, false);
             case METRIC_DERIVATIVE, CHRISTOFFEL, CHRISTOFFEL_FIRST_KIND -> new Shape(List.of(n, n, n), 0, true);
-            case CHRISTOFFEL_TRACE, CONTRACTED_CHRISTOFFEL, GEODESIC_ACCELERATION ->
-                new Shape(List.of(n), 0, false);
+            case CHRISTOFFEL_TRACE, CONTRACTED_CHRISTOFFEL, GEODESIC_ACCELERATION -> new Shape(List.of(n), 0, false);
             case HAMILTONIAN_FLOW -> new Shape(List.of(2 * n), 0, false);
         };
     }

@@ -29,7 +29,11 @@ public record OperationCount(int additions, int multiplications, int divisions, 
         StringBuilder text = new StringBuilder();
         text.append(operations()).append(operations() == 1 ? " operation" : " operations");
         if (operations() > 0) {
-            text.append(" (").append(additions).append(" +, ").append(multiplications).append(" ×, ");
+            text.append(" (")
+                    .append(additions)
+                    .append(" +, ")
+                    .append(multiplications)
+                    .append(" ×, ");
             text.append(divisions).append(" ÷)");
         }
         String separator = " and ";

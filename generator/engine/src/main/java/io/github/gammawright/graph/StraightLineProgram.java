@@ -31,7 +31,8 @@ public final class StraightLineProgram {
         this.parameterOnly = new boolean[instructions.size()];
         for (int i = 0; i < instructions.size(); i++) {
             Instruction instruction = instructions.get(i);
-            boolean fixed = !(instruction instanceof Instruction.Load load) || load.symbol().isParameter();
+            boolean fixed = !(instruction instanceof Instruction.Load load)
+                    || load.symbol().isParameter();
             for (int operand : instruction.operands()) {
                 if (operand < 0 || operand >= i) {
                     throw new IllegalArgumentException("instruction " + i + " uses instruction " + operand);

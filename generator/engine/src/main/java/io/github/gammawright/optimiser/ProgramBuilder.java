@@ -1,0 +1,66 @@
+package io.github.gammawright.optimiser;
+
+import io.github.gammawright.graph.Instruction;
+import io.github.gammawright.graph.StraightLineProgram;
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import org.hipparchus.fraction.BigFraction;
+
+/** Appends instructions one by one; an instruction that is there already is not repeated. */
+final class ProgramBuilder {
+
+    private final List<Instruction> instructions = new ArrayList<>();
+    private final Map<Instruction, Integer> known = new HashMap<>();
+    private final Map<Integer, String> names = new LinkedHashMap<>();
+
+    int append(Instruction instruction) {
+        Integer number = known.get(instruction);
+        if (number == null) {
+            number = instructions.size();
+            instructions.add(instruction);
+            known.put(instruction, number);
+        }
+        return number;
+    }
+
+    int constant(BigFraction value) {
+        return append(new Instruction.Constant(value));
+    }
+
+    int add(int a, int b) {
+        return arithmetic(Instruction.Operator.ADD, Math.min(a, b), Math.max(a, b));
+    }
+
+    int subtract(int a, int b) {
+        return arithmetic(Instruction.Operator.SUBTRACT, a, b);
+    }
+
+    int multiply(int a, int b) {
+        return arithmetic(Instruction.Operator.MULTIPLY, Math.min(a, b), Math.max(a, b));
+    }
+
+    int divide(int a, int b) {
+        return arithmetic(Instruction.Operator.DIVIDE, a, b);
+    }
+
+    int negate(int a) {
+        return instructions.get(a) instanceof Instruction.Negation negation
+                ? negation.operand()
+                : append(new Instruction.Negation(a));
+    }
+
+    private int arithmetic(Instruction.Operator operator, int a, int b) {
+        return append(new Instruction.Arithmetic(operator, a, b));
+    }
+
+    void name(int number, String name) {
+        names.putIfAbsent(number, name);
+    }
+
+    StraightLineProgram build(List<Integer> outputs) {
+        return new StraightLineProgram(instructions, names, outputs);
+    }
+}

@@ -17,6 +17,7 @@ import java.util.Optional;
  * @param velocities the symbols u^i
  * @param squares the author's line element as a sum of weighted squares of one-forms, where it is one
  */
+@SuppressWarnings("ArrayRecordComponent") // the matrix is read by index everywhere and never handed out of the engine
 public record MetricGraph(
         ExpressionGraph graph,
         List<Symbol> coordinates,

@@ -182,45 +182,42 @@ final class Fingerprints {
     }
 
     private long call(Node.Call call, int k) {
-        switch (call.function()) {
-            case SIN:
-                return angle(call.operands().get(0), k)[1];
-            case COS:
-                return angle(call.operands().get(0), k)[0];
-            case EXP:
-                return P.power(SQUARE, exponentValue(call.operands().get(0), k));
-            case SINH, COSH, TANH: {
-                long up = P.power(SQUARE, exponentValue(call.operands().get(0), k));
-                long down = P.inverse(up);
-                long half = P.inverse(2);
-                long sinh = P.multiply(half, P.subtract(up, down));
-                long cosh = P.multiply(half, P.add(up, down));
-                if (call.function() == RealFunction.TANH) {
-                    if (cosh == 0) {
-                        throw new UnsuitablePoint();
-                    }
-                    return P.multiply(sinh, P.inverse(cosh));
-                }
-                return call.function() == RealFunction.SINH ? sinh : cosh;
-            }
-            case ABS: {
-                long x = at(call.operands().get(0), k);
-                return P.isSquare(x) ? x : P.negate(x);
-            }
-            case SIGNUM: {
-                long x = at(call.operands().get(0), k);
-                return x == 0 ? 0 : P.isSquare(x) ? 1 : P.negate(1);
-            }
-            default: {
+        Node x = call.operands().get(0);
+        return switch (call.function()) {
+            case SIN -> angle(x, k)[1];
+            case COS -> angle(x, k)[0];
+            case EXP -> P.power(SQUARE, exponentValue(x, k));
+            case SINH, COSH, TANH -> hyperbolic(call.function(), exponentValue(x, k));
+            case ABS -> P.isSquare(at(x, k)) ? at(x, k) : P.negate(at(x, k));
+            case SIGNUM -> at(x, k) == 0 ? 0 : P.isSquare(at(x, k)) ? 1 : P.negate(1);
+            default -> {
                 long[] key = new long[2 + call.operands().size()];
                 key[0] = 4;
-                key[1] = call.function().ordinal();
+                key[1] = textKey(call.function().symbol());
                 for (int i = 0; i < call.operands().size(); i++) {
                     key[2 + i] = at(call.operands().get(i), k);
                 }
-                return oracle(P, k, key);
+                yield oracle(P, k, key);
             }
+        };
+    }
+
+    private static long hyperbolic(RealFunction function, long exponent) {
+        long up = P.power(SQUARE, exponent);
+        long down = P.inverse(up);
+        long half = P.inverse(2);
+        long sinh = P.multiply(half, P.subtract(up, down));
+        long cosh = P.multiply(half, P.add(up, down));
+        if (function == RealFunction.SINH) {
+            return sinh;
         }
+        if (function == RealFunction.COSH) {
+            return cosh;
+        }
+        if (cosh == 0) {
+            throw new UnsuitablePoint();
+        }
+        return P.multiply(sinh, P.inverse(cosh));
     }
 
     /** Cosine and sine of an angle, which is taken apart into rational multiples of nodes. */
@@ -350,7 +347,7 @@ final class Fingerprints {
         List<Node> operands = node.operands();
         long[] key = new long[2 + operands.size()];
         key[0] = 9;
-        key[1] = node instanceof Node.Call call ? call.function().ordinal() : -1;
+        key[1] = node instanceof Node.Call call ? textKey(call.function().symbol()) : -1;
         for (int i = 0; i < operands.size(); i++) {
             key[2 + i] = exponentValue(operands.get(i), k);
         }
@@ -367,9 +364,14 @@ final class Fingerprints {
         }
     }
 
+    /** A number that depends on the letters of a name alone. */
+    private static long textKey(String text) {
+        return text.hashCode();
+    }
+
     private static long symbolKey(Symbol symbol) {
         // the same bits in every virtual machine, unlike the hash code of an enum constant
-        long key = symbol.kind().ordinal() * 1_000_003L + symbol.index();
+        long key = textKey(symbol.kind().name()) * 1_000_003L + symbol.index();
         for (int order : symbol.orders()) {
             key = key * 31 + order + 1;
         }

@@ -19,7 +19,7 @@ public interface SamplePoints {
 
             @Override
             public double value(Symbol symbol, int point) {
-                long key = symbol.kind().ordinal() * 1_000_003L + symbol.index() * 8_191L + point;
+                long key = symbol.kind().name().hashCode() * 1_000_003L + symbol.index() * 8_191L + point;
                 for (int order : symbol.orders()) {
                     key = key * 31 + order + 1;
                 }

@@ -1,7 +1,5 @@
-package io.github.gammawright.optimiser;
+package io.github.gammawright.graph;
 
-import io.github.gammawright.graph.Instruction;
-import io.github.gammawright.graph.StraightLineProgram;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.LinkedHashMap;

@@ -1,10 +1,5 @@
-package io.github.gammawright.optimiser;
+package io.github.gammawright.graph;
 
-import io.github.gammawright.graph.ExpressionGraph;
-import io.github.gammawright.graph.Instruction;
-import io.github.gammawright.graph.Node;
-import io.github.gammawright.graph.RealFunction;
-import io.github.gammawright.graph.StraightLineProgram;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.HashMap;

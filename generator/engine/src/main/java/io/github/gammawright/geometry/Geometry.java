@@ -1,0 +1,271 @@
+package io.github.gammawright.geometry;
+
+import io.github.gammawright.graph.Differentiation;
+import io.github.gammawright.graph.ExpressionGraph;
+import io.github.gammawright.graph.Node;
+import io.github.gammawright.graph.RealFunction;
+import io.github.gammawright.graph.Symbol;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import org.hipparchus.fraction.BigFraction;
+
+/**
+ * The quantities of one metric as nodes of its graph, along one {@link Route}. Everything is computed once, when it is
+ * first asked for.
+ */
+public final class Geometry {
+
+    private final MetricGraph metric;
+    private final Route route;
+    private final ExpressionGraph graph;
+    private final Differentiation differentiation;
+    private final int n;
+    private InverseMetric inverse;
+    private Node[][][] metricDerivative;
+    private Node[][][] firstKind;
+    private Node[][][] christoffel;
+
+    /** The geometry of a metric, along a route. */
+    public Geometry(MetricGraph metric, Route route) {
+        this.metric = metric;
+        this.route = route;
+        this.graph = metric.graph();
+        this.differentiation = new Differentiation(graph);
+        this.n = metric.dimension();
+    }
+
+    /** All components of a quantity, row-major over all its indices. */
+    public List<Node> components(Quantity quantity) {
+        List<Node> components = new ArrayList<>();
+        switch (quantity) {
+            case METRIC -> addMatrix(metric.components(), components);
+            case INVERSE_METRIC -> addMatrix(inverse().components(), components);
+            case VOLUME_ELEMENT -> components.add(volumeElement());
+            case METRIC_DERIVATIVE -> addTensor(metricDerivative(), components);
+            case CHRISTOFFEL -> addTensor(christoffel(), components);
+            case CHRISTOFFEL_FIRST_KIND -> addTensor(firstKind(), components);
+            case CHRISTOFFEL_TRACE -> components.addAll(trace());
+            case CONTRACTED_CHRISTOFFEL -> components.addAll(contracted());
+            case GEODESIC_ACCELERATION -> components.addAll(geodesicAcceleration());
+            case HAMILTONIAN_FLOW -> components.addAll(hamiltonianFlow());
+        }
+        return components;
+    }
+
+    private static void addMatrix(Node[][] matrix, List<Node> components) {
+        for (Node[] row : matrix) {
+            components.addAll(List.of(row));
+        }
+    }
+
+    private static void addTensor(Node[][][] tensor, List<Node> components) {
+        for (Node[][] matrix : tensor) {
+            addMatrix(matrix, components);
+        }
+    }
+
+    private InverseMetric inverse() {
+        if (inverse == null) {
+            inverse = route.inverse(metric);
+        }
+        return inverse;
+    }
+
+    /** ∂_k g_ij; k, i, j. */
+    private Node[][][] metricDerivative() {
+        if (metricDerivative == null) {
+            metricDerivative = new Node[n][n][n];
+            for (int k = 0; k < n; k++) {
+                for (int i = 0; i < n; i++) {
+                    for (int j = 0; j <= i; j++) {
+                        Node derivative = differentiation.derivative(
+                                metric.components()[i][j], metric.coordinates().get(k));
+                        graph.keep(derivative);
+                        metricDerivative[k][i][j] = derivative;
+                        metricDerivative[k][j][i] = derivative;
+                    }
+                }
+            }
+        }
+        return metricDerivative;
+    }
+
+    /** Γ_kij = ½ (∂_i g_kj + ∂_j g_ki − ∂_k g_ij); k, i, j. */
+    private Node[][][] firstKind() {
+        if (firstKind == null) {
+            Node[][][] d = metricDerivative();
+            firstKind = new Node[n][n][n];
+            for (int k = 0; k < n; k++) {
+                for (int i = 0; i < n; i++) {
+                    for (int j = 0; j <= i; j++) {
+                        Node sum = graph.sum(List.of(d[i][k][j], d[j][k][i], graph.negate(d[k][i][j])));
+                        Node half = graph.multiple(BigFraction.ONE_HALF, sum);
+                        graph.keep(half);
+                        firstKind[k][i][j] = half;
+                        firstKind[k][j][i] = half;
+                    }
+                }
+            }
+        }
+        return firstKind;
+    }
+
+    /** Γ^k_ij = g^kl Γ_lij; k, i, j. */
+    private Node[][][] christoffel() {
+        if (christoffel == null) {
+            Node[][][] lower = firstKind();
+            christoffel = new Node[n][n][n];
+            for (int i = 0; i < n; i++) {
+                for (int j = 0; j <= i; j++) {
+                    List<Node> covector = new ArrayList<>();
+                    for (int l = 0; l < n; l++) {
+                        covector.add(lower[l][i][j]);
+                    }
+                    List<Node> raised = inverse().raise(covector);
+                    for (int k = 0; k < n; k++) {
+                        graph.keep(raised.get(k));
+                        christoffel[k][i][j] = raised.get(k);
+                        christoffel[k][j][i] = raised.get(k);
+                    }
+                }
+            }
+        }
+        return christoffel;
+    }
+
+    /** √|det g|, factor by factor, so that squares lose their root. */
+    private Node volumeElement() {
+        return absoluteRoot(inverse().determinant());
+    }
+
+    private Node absoluteRoot(Node node) {
+        if (node instanceof Node.Multiple multiple) {
+            return graph.multiply(
+                    graph.sqrt(graph.constant(multiple.coefficient().abs())), absoluteRoot(multiple.node()));
+        }
+        if (node instanceof Node.Product product) {
+            return graph.product(
+                    product.operands().stream().map(this::absoluteRoot).toList());
+        }
+        if (node instanceof Node.Power power) {
+            return graph.power(
+                    graph.call(RealFunction.ABS, power.base()), power.exponent().divide(BigFraction.TWO));
+        }
+        return graph.sqrt(graph.call(RealFunction.ABS, node));
+    }
+
+    /** Γ^m_mk = ½ g^ij ∂_k g_ij. */
+    private List<Node> trace() {
+        Node[][] g = inverse().components();
+        List<Node> trace = new ArrayList<>();
+        for (int k = 0; k < n; k++) {
+            List<Node> terms = new ArrayList<>();
+            for (int i = 0; i < n; i++) {
+                for (int j = 0; j <= i; j++) {
+                    Node term = graph.multiply(g[i][j], metricDerivative()[k][i][j]);
+                    terms.add(i == j ? graph.multiple(BigFraction.ONE_HALF, term) : term);
+                }
+            }
+            trace.add(graph.sum(terms));
+        }
+        return trace;
+    }
+
+    /** g^ij Γ^k_ij, the first kind contracted before it is raised. */
+    private List<Node> contracted() {
+        Node[][] g = inverse().components();
+        List<Node> covector = new ArrayList<>();
+        for (int l = 0; l < n; l++) {
+            List<Node> terms = new ArrayList<>();
+            for (int i = 0; i < n; i++) {
+                for (int j = 0; j <= i; j++) {
+                    Node term = graph.multiply(g[i][j], firstKind()[l][i][j]);
+                    terms.add(i == j ? term : graph.multiple(BigFraction.TWO, term));
+                }
+            }
+            Node sum = graph.sum(terms);
+            graph.keep(sum);
+            covector.add(sum);
+        }
+        return inverse().raise(covector);
+    }
+
+    private List<Node> geodesicAcceleration() {
+        List<Node> velocity = metric.velocities().stream().map(graph::symbol).toList();
+        return route.flow() == Route.Flow.CONTRACTION ? contractedAcceleration(velocity) : sweptAcceleration(velocity);
+    }
+
+    /** −Γ^k_ij u^i u^j, from the Γ that are there. */
+    private List<Node> contractedAcceleration(List<Node> velocity) {
+        List<Node> acceleration = new ArrayList<>();
+        for (int k = 0; k < n; k++) {
+            List<Node> terms = new ArrayList<>();
+            for (int i = 0; i < n; i++) {
+                for (int j = 0; j <= i; j++) {
+                    Node term = graph.product(List.of(christoffel()[k][i][j], velocity.get(i), velocity.get(j)));
+                    terms.add(graph.multiple(new BigFraction(i == j ? -1 : -2), term));
+                }
+            }
+            acceleration.add(graph.sum(terms));
+        }
+        return acceleration;
+    }
+
+    /**
+     * The acceleration from L = ½ g_ij u^i u^j without any Γ: ∂L/∂x^i − (u·∂) p_i with p_i = ∂L/∂u^i, by a backward and a
+     * forward sweep, then raised.
+     */
+    private List<Node> sweptAcceleration(List<Node> velocity) {
+        Node lagrangian = graph.multiple(BigFraction.ONE_HALF, quadraticForm(velocity));
+        List<Symbol> all = new ArrayList<>(metric.coordinates());
+        all.addAll(metric.velocities());
+        List<Node> gradient = differentiation.gradient(lagrangian, all);
+        Map<Symbol, Node> along = new LinkedHashMap<>();
+        for (int i = 0; i < n; i++) {
+            along.put(metric.coordinates().get(i), velocity.get(i));
+        }
+        List<Node> rates = differentiation.directional(gradient.subList(n, 2 * n), along);
+        List<Node> covector = new ArrayList<>();
+        for (int i = 0; i < n; i++) {
+            Node force = graph.subtract(gradient.get(i), rates.get(i));
+            graph.keep(force);
+            covector.add(force);
+        }
+        return inverse().raise(covector);
+    }
+
+    private Node quadraticForm(List<Node> velocity) {
+        if (route.flow() == Route.Flow.AUTHORS_FORM && metric.quadraticForm().isPresent()) {
+            return metric.quadraticForm().get();
+        }
+        List<Node> terms = new ArrayList<>();
+        for (int i = 0; i < n; i++) {
+            for (int j = 0; j <= i; j++) {
+                Node term = graph.product(List.of(metric.components()[i][j], velocity.get(i), velocity.get(j)));
+                terms.add(i == j ? term : graph.multiple(BigFraction.TWO, term));
+            }
+        }
+        return graph.sum(terms);
+    }
+
+    /** dx^i/dλ = ∂H/∂p_i, then dp_i/dλ = −∂H/∂x^i, by one backward sweep. */
+    private List<Node> hamiltonianFlow() {
+        List<Symbol> momenta = new ArrayList<>();
+        for (int i = 0; i < n; i++) {
+            momenta.add(
+                    Symbol.of(Symbol.Kind.MOMENTUM, metric.coordinates().get(i).name(), i));
+        }
+        List<Node> momentum = momenta.stream().map(graph::symbol).toList();
+        Node hamiltonian = graph.multiple(BigFraction.ONE_HALF, inverse().square(momentum));
+        List<Symbol> all = new ArrayList<>(momenta);
+        all.addAll(metric.coordinates());
+        List<Node> gradient = differentiation.gradient(hamiltonian, all);
+        List<Node> flow = new ArrayList<>(gradient.subList(0, n));
+        for (Node force : gradient.subList(n, 2 * n)) {
+            flow.add(graph.negate(force));
+        }
+        return flow;
+    }
+}

@@ -1,0 +1,127 @@
+package io.github.gammawright.verification.reference;
+
+import io.github.gammawright.definition.Expression;
+import io.github.gammawright.definition.MetricDefinition;
+import io.github.gammawright.definition.MetricDefinition.Comparison;
+import io.github.gammawright.definition.MetricDefinition.Condition;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import java.util.OptionalDouble;
+import java.util.concurrent.ConcurrentHashMap;
+
+/**
+ * Evaluates a definition in high precision: {@code new ReferenceEvaluator(definition, 50).at(parameters, point)} gives
+ * an object from which any quantity can be asked at that point. Thread-safe.
+ *
+ * <p>All doubles that go in are taken as exact. Numbers are carried with at least 64 bits more than the digits asked for,
+ * so that those digits hold through cancellations that lose up to about 15 of them.
+ */
+public final class ReferenceEvaluator {
+
+    /** The digits that are used where nothing else is said. */
+    public static final int DEFAULT_DIGITS = 50;
+
+    private final MetricDefinition definition;
+    private final int digits;
+    private final RealFunctions functions;
+    private final Map<BasisKey, TaylorBasis> bases = new ConcurrentHashMap<>();
+
+    /** An evaluator in {@value #DEFAULT_DIGITS} digits. */
+    public ReferenceEvaluator(MetricDefinition definition) {
+        this(definition, DEFAULT_DIGITS);
+    }
+
+    /**
+     * An evaluator.
+     *
+     * @param digits decimal digits, from 10 to 1,000
+     */
+    public ReferenceEvaluator(MetricDefinition definition, int digits) {
+        if (digits < 10 || digits > 1000) {
+            throw new IllegalArgumentException("digits must be from 10 to 1000, not " + digits);
+        }
+        this.definition = definition;
+        this.digits = digits;
+        this.functions = new RealFunctions(RealArithmetic.ofDigits(digits));
+    }
+
+    private record BasisKey(int variables, int order) {}
+
+    /** What is evaluated. */
+    public MetricDefinition definition() {
+        return definition;
+    }
+
+    /** The decimal digits that results hold. */
+    public int digits() {
+        return digits;
+    }
+
+    /**
+     * The definition at a point.
+     *
+     * @param parameters one for each parameter, in declared order
+     * @param point one for each coordinate, in index order
+     */
+    public ReferencePoint at(double[] parameters, double[] point) {
+        requireLength("parameters", parameters, definition.parameters().size());
+        requireLength("coordinates", point, definition.dimension());
+        return new ReferencePoint(this, parameters.clone(), point.clone());
+    }
+
+    /** Whether all conditions of the definition's domain hold; a comparison with an undefined number does not. */
+    public boolean inDomain(double[] parameters, double[] point) {
+        MetricSeries series = at(parameters, point).plainSeries(0);
+        return definition.domain().conditions().stream().allMatch(condition -> holds(condition, series));
+    }
+
+    private static boolean holds(Condition condition, MetricSeries series) {
+        List<Real> operands = new ArrayList<>();
+        for (Expression operand : condition.operands()) {
+            operands.add(series.scalar(operand).value());
+        }
+        for (int i = 0; i < condition.comparisons().size(); i++) {
+            if (!holds(condition.comparisons().get(i), operands.get(i), operands.get(i + 1))) {
+                return false;
+            }
+        }
+        return true;
+    }
+
+    private static boolean holds(Comparison comparison, Real left, Real right) {
+        return switch (comparison) {
+            case LESS -> left.isLessThan(right);
+            case LESS_OR_EQUAL -> left.isAtMost(right);
+            case GREATER -> right.isLessThan(left);
+            case GREATER_OR_EQUAL -> right.isAtMost(left);
+        };
+    }
+
+    /** The default of each parameter, rounded once to the nearest double; empty where the definition gives none. */
+    public List<OptionalDouble> defaultParameters() {
+        ExpressionEvaluator evaluator = new ExpressionEvaluator(ring(1, 0), 1);
+        List<OptionalDouble> defaults = new ArrayList<>();
+        for (MetricDefinition.Parameter parameter : definition.parameters()) {
+            defaults.add(parameter
+                    .defaultExpression()
+                    .map(expression -> OptionalDouble.of(
+                            evaluator.scalar(expression).value().toDouble()))
+                    .orElse(OptionalDouble.empty()));
+        }
+        return List.copyOf(defaults);
+    }
+
+    /** Series in so many variables, the first of them the coordinates. */
+    TaylorRing ring(int variables, int order) {
+        TaylorBasis basis =
+                bases.computeIfAbsent(new BasisKey(variables, order), key -> new TaylorBasis(key.variables, key.order));
+        return new TaylorRing(functions, basis, definition.dimension());
+    }
+
+    static void requireLength(String what, double[] array, int length) {
+        if (array.length != length) {
+            throw new IllegalArgumentException("there must be " + length + " " + what + ", not " + array.length);
+        }
+    }
+}

@@ -23,7 +23,7 @@ public abstract sealed class Node {
         return id;
     }
 
-    /** The numbers of the symbols that the value depends on, by {@link ExpressionGraph#symbolNumber}. */
+    /** The numbers of the symbols that the value depends on, as their graph counts them. */
     final BitSet symbols() {
         return symbols;
     }

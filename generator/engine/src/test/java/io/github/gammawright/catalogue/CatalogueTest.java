@@ -49,8 +49,15 @@ class CatalogueTest {
         assertThat(catalogue.find("../catalogue/kerr")).isEmpty();
     }
 
+    /** One for each spacetime or surface that users expect to find, under the name that they will type. */
     @Test
     void holdsTheMetricsThatUsersAskForByName() {
-        assertThat(catalogue.names()).contains("schwarzschild", "kerr", "kerr-schild");
+        assertThat(catalogue.names())
+                .contains("minkowski", "minkowski-spherical", "minkowski-cylindrical")
+                .contains("schwarzschild", "schwarzschild-isotropic", "painleve-gullstrand", "eddington-finkelstein")
+                .contains("reissner-nordstrom", "kerr", "kerr-schild", "kerr-schild-spherical", "kerr-newman")
+                .contains("de-sitter", "anti-de-sitter", "flrw-flat", "flrw-open", "flrw-closed", "godel", "kasner")
+                .contains("ellis-wormhole", "plane-wave", "majumdar-papapetrou", "tangherlini")
+                .contains("sphere", "torus", "ellipsoid-of-revolution", "ellipsoid-three-axis", "dense-eight");
     }
 }

@@ -1,0 +1,114 @@
+package io.github.gammawright.emission;
+
+import com.palantir.javapoet.TypeSpec;
+import io.github.gammawright.graph.Instruction;
+import io.github.gammawright.graph.StraightLineProgram;
+import io.github.gammawright.graph.Symbol;
+import java.util.ArrayList;
+import java.util.BitSet;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+
+/**
+ * What the writers of a class's parts share.
+ *
+ * @param names of everything that has a name outside the bodies
+ * @param kernel what is computed
+ * @param values names of the computed values
+ * @param functions how functions are called
+ * @param kept the values on parameters alone that the constructor computes for later
+ * @param type the class under construction
+ */
+record EmissionContext(
+        KernelModel model,
+        KernelNames names,
+        KernelProgram kernel,
+        ValueNames values,
+        FunctionNames functions,
+        BitSet kept,
+        TypeSpec.Builder type) {
+
+    static EmissionContext of(KernelModel model, TypeSpec.Builder type) {
+        KernelNames names = new KernelNames(model);
+        KernelProgram kernel = KernelProgram.of(model);
+        StraightLineProgram program = kernel.program();
+        ValueNames values = new ValueNames(program, names, componentNames(model));
+        List<Integer> roots = new ArrayList<>();
+        kernel.slots().forEach(roots::addAll);
+        for (KernelModel.Condition condition : kernel.conditions()) {
+            if (!kernel.isOnParameters(condition)) {
+                roots.addAll(condition.operands());
+            }
+        }
+        BitSet kept = ParameterWork.kept(program, roots);
+        return new EmissionContext(model, names, kernel, values, new FunctionNames(model.className()), kept, type);
+    }
+
+    StraightLineProgram program() {
+        return kernel.program();
+    }
+
+    boolean isSingle() {
+        return model.results().size() == 1;
+    }
+
+    /** The number of entries of a result array. */
+    int length(int result) {
+        return model.results().get(result).slots().size();
+    }
+
+    /** The constant that holds it. */
+    String lengthConstant(int result) {
+        return KernelNames.lengthConstant(model.results().get(result).quantity(), isSingle());
+    }
+
+    /** The results as private methods see them. */
+    List<ArrayTarget> resultTargets() {
+        List<ArrayTarget> targets = new ArrayList<>();
+        for (int r = 0; r < model.results().size(); r++) {
+            targets.add(new ArrayTarget(names.results().get(r), names.offsets().get(r)));
+        }
+        return targets;
+    }
+
+    /** The given entries of inputs that a body uses, in the order of the inputs. */
+    List<InputUse> inputUses(Inlining inlining) {
+        Map<Symbol, Boolean> used = new HashMap<>();
+        for (int i = 0; i < program().size(); i++) {
+            if (program().instruction(i) instanceof Instruction.Load load && inlining.uses(i) > 0) {
+                used.put(load.symbol(), true);
+            }
+        }
+        List<InputUse> uses = new ArrayList<>();
+        for (KernelInput input : names.inputs()) {
+            for (int i = 0; i < input.length(); i++) {
+                Symbol symbol = Symbol.of(input.kind(), input.coordinates().get(i), i);
+                if (used.containsKey(symbol)) {
+                    uses.add(new InputUse(input, i, names.scalars(input).get(i)));
+                }
+            }
+        }
+        return uses;
+    }
+
+    /** An entry of an input that a body reads. */
+    record InputUse(KernelInput input, int index, String name) {}
+
+    /** {@code christoffel_t_t_r} for the value behind that entry; the first entry counts. */
+    private static Map<Integer, String> componentNames(KernelModel model) {
+        Map<Integer, String> names = new HashMap<>();
+        List<String> coordinates = model.definition().coordinates();
+        for (KernelModel.Result result : model.results()) {
+            for (int slot = 0; slot < result.slots().size(); slot++) {
+                StringBuilder name = new StringBuilder(result.quantity().variableName());
+                for (int index : result.components().get(slot)) {
+                    int coordinate = index + result.shape().first();
+                    name.append('_').append(coordinate < coordinates.size() ? coordinates.get(coordinate) : coordinate);
+                }
+                names.putIfAbsent(result.slots().get(slot), name.toString());
+            }
+        }
+        return names;
+    }
+}

@@ -1,0 +1,110 @@
+package io.github.gammawright.emission;
+
+import com.palantir.javapoet.CodeBlock;
+import com.palantir.javapoet.FieldSpec;
+import com.palantir.javapoet.MethodSpec;
+import io.github.gammawright.geometry.Layout;
+import io.github.gammawright.geometry.Shape;
+import java.util.List;
+import java.util.Objects;
+import javax.lang.model.element.Modifier;
+
+/** Writes the constants that give the lengths, and the methods that say where a component is. */
+final class IndexMethods {
+
+    private static final List<String> INDICES = List.of("l", "k", "i", "j");
+
+    private final EmissionContext context;
+
+    IndexMethods(EmissionContext context) {
+        this.context = context;
+    }
+
+    void emit() {
+        constant("DIMENSION", context.model().definition().dimension());
+        for (int r = 0; r < context.model().results().size(); r++) {
+            constant(context.lengthConstant(r), context.length(r));
+        }
+        for (KernelModel.Result result : context.model().results()) {
+            index(result);
+        }
+    }
+
+    private void constant(String name, int value) {
+        context.type()
+                .addField(FieldSpec.builder(int.class, name, Modifier.PUBLIC, Modifier.STATIC, Modifier.FINAL)
+                        .initializer("$L", value)
+                        .build());
+    }
+
+    private void index(KernelModel.Result result) {
+        Shape shape = result.shape();
+        String name = context.isSingle() ? "index" : result.quantity().variableName() + "Index";
+        MethodSpec.Builder method = MethodSpec.methodBuilder(name)
+                .addModifiers(Modifier.PUBLIC, Modifier.STATIC)
+                .returns(int.class);
+        List<String> indices = names(shape.rank());
+        indices.forEach(index -> method.addParameter(int.class, index));
+        method.addCode(position(shape, indices, context.model().layout() != Layout.FULL));
+        if (context.model().layout() == Layout.NON_ZERO) {
+            lookUp(result, method);
+        } else {
+            method.addStatement("return position");
+        }
+        context.type().addMethod(method.build());
+    }
+
+    private static List<String> names(int rank) {
+        return switch (rank) {
+            case 1 -> List.of("k");
+            case 2 -> List.of("i", "j");
+            default -> INDICES.subList(INDICES.size() - rank, INDICES.size());
+        };
+    }
+
+    /** Row-major order, in which the last two indices may be folded to a triangle. */
+    private static CodeBlock position(Shape shape, List<String> indices, boolean packed) {
+        CodeBlock.Builder code = CodeBlock.builder();
+        boolean triangle = packed && shape.symmetricPair();
+        int rows = triangle ? shape.rank() - 2 : shape.rank();
+        for (int i = 0; i < indices.size(); i++) {
+            String index = indices.get(i);
+            String counted = shape.first() == 0 ? index : index + " - " + shape.first();
+            code.addStatement("$T.checkIndex($L, $L)", Objects.class, counted,
+                    shape.extents().get(i));
+        }
+        StringBuilder position = new StringBuilder();
+        for (int i = 0; i < rows; i++) {
+            String counted = shape.first() == 0 ? indices.get(i) : indices.get(i) + " - " + shape.first();
+            if (i == 0) {
+                position.append(counted);
+            } else {
+                String former = position.toString();
+                position.setLength(0);
+                position.append(i == 1 && shape.first() == 0 ? former : "(" + former + ")");
+                position.append(" * ").append(shape.extents().get(i)).append(" + ").append(counted);
+            }
+        }
+        if (triangle) {
+            int n = shape.extents().get(shape.rank() - 1);
+            String i = indices.get(shape.rank() - 2);
+            String j = indices.get(shape.rank() - 1);
+            code.addStatement("int row = Math.max($L, $L)", i, j);
+            code.addStatement("int column = Math.min($L, $L)", i, j);
+            String former = rows == 0 ? "" : (rows == 1 ? position : "(" + position + ")") + " * " + n * (n + 1) / 2 + " + ";
+            position = new StringBuilder(former + "row * (row + 1) / 2 + column");
+        }
+        code.addStatement("int position = $L", position.isEmpty() ? "0" : position);
+        return code.build();
+    }
+
+    private static void lookUp(KernelModel.Result result, MethodSpec.Builder method) {
+        method.beginControlFlow("return switch (position)");
+        for (int slot = 0; slot < result.components().size(); slot++) {
+            int[] tuple = result.components().get(slot).stream().mapToInt(i -> i).toArray();
+            method.addCode("case $L -> $L;\n", result.shape().packedIndex(tuple), slot);
+        }
+        method.addCode("default -> -1;\n");
+        method.endControlFlow("");
+    }
+}

@@ -1,0 +1,54 @@
+package io.github.gammawright.emission;
+
+import io.github.gammawright.definition.MetricDefinition;
+import io.github.gammawright.graph.Symbol;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+
+/**
+ * An array that a kernel reads.
+ *
+ * @param kind what its entries are in the program
+ * @param name the name of the array as an argument
+ * @param coordinates the author's names of the coordinates that its entries belong to, in their order
+ */
+record KernelInput(Symbol.Kind kind, String name, List<String> coordinates) {
+
+    KernelInput {
+        coordinates = List.copyOf(coordinates);
+    }
+
+    int length() {
+        return coordinates.size();
+    }
+
+    /** The name for an array of many such inputs. */
+    String plural() {
+        return name.endsWith("y") ? name.substring(0, name.length() - 1) + "ies" : name + "s";
+    }
+
+    /** The point, then the further inputs of all results, each once. */
+    static List<KernelInput> of(KernelModel model) {
+        MetricDefinition definition = model.definition();
+        List<KernelInput> inputs = new ArrayList<>();
+        inputs.add(new KernelInput(Symbol.Kind.COORDINATE, "point", definition.coordinates()));
+        for (KernelModel.Result result : model.results()) {
+            for (String further : result.quantity().furtherInputs()) {
+                KernelInput input = further(further, result, definition);
+                if (!inputs.contains(input)) {
+                    inputs.add(input);
+                }
+            }
+        }
+        return List.copyOf(inputs);
+    }
+
+    private static KernelInput further(String name, KernelModel.Result result, MetricDefinition definition) {
+        Symbol.Kind kind = Symbol.Kind.valueOf(name.toUpperCase(Locale.ROOT));
+        // a velocity by coordinate time has no entry for the time, which is 1
+        boolean byTime = kind == Symbol.Kind.VELOCITY && result.shape().first() == 1;
+        List<String> coordinates = definition.coordinates();
+        return new KernelInput(kind, name, byTime ? coordinates.subList(1, coordinates.size()) : coordinates);
+    }
+}

@@ -1,0 +1,75 @@
+package io.github.gammawright.emission;
+
+import io.github.gammawright.graph.Instruction;
+import io.github.gammawright.graph.StraightLineProgram;
+import io.github.gammawright.graph.Symbol;
+import java.util.HashMap;
+import java.util.Map;
+import java.util.function.IntFunction;
+
+/** The names of a program's values in the emitted class: one for each value, whatever method it occurs in. */
+final class ValueNames {
+
+    private final StraightLineProgram program;
+    private final Map<Integer, String> variables = new HashMap<>();
+    private final Map<Integer, String> given = new HashMap<>();
+    private final TemporaryNames temporaries;
+
+    /**
+     * Names what is loaded.
+     *
+     * @param components names of values that are components of the result
+     */
+    ValueNames(StraightLineProgram program, KernelNames kernel, Map<Integer, String> components) {
+        this.program = program;
+        this.temporaries = new TemporaryNames(program, kernel.allocator(), this::known, components);
+        Map<Symbol, String> derivatives = new HashMap<>();
+        for (int i = 0; i < program.size(); i++) {
+            if (program.instruction(i) instanceof Instruction.Load load) {
+                Symbol symbol = load.symbol();
+                String name = kernel.symbol(symbol);
+                if (name == null) {
+                    name = derivatives.computeIfAbsent(
+                            symbol, s -> kernel.allocator().allocate(kernel.wantedDerivative(s)));
+                }
+                given.put(i, name);
+            }
+        }
+    }
+
+    /** Says by what text a value is at hand in every method. */
+    void give(int number, String text) {
+        given.put(number, text);
+    }
+
+    /** The name of a value that is loaded or kept, null for all others. */
+    String given(int number) {
+        return given.get(number);
+    }
+
+    boolean isGiven(int number) {
+        return given.containsKey(number);
+    }
+
+    /** The name of a value as a variable; the first call chooses it. */
+    String variable(int number) {
+        String name = variables.get(number);
+        if (name == null) {
+            name = temporaries.allocate(number);
+            variables.put(number, name);
+        }
+        return name;
+    }
+
+    private String known(int number) {
+        String name = given.get(number);
+        return name != null ? name : variables.get(number);
+    }
+
+    /** A printer for a body with the given variables. */
+    ExpressionPrinter printer(Inlining inlining, ExpressionPrinter.FunctionCalls functions) {
+        IntFunction<String> names =
+                i -> isGiven(i) ? given(i) : inlining.variables().get(i) ? variable(i) : null;
+        return new ExpressionPrinter(program, names, functions);
+    }
+}

@@ -35,7 +35,10 @@ final class ArgumentChecks {
         for (int r = 1; r < results.size(); r++) {
             for (int s = 0; s < r; s++) {
                 distinct = true;
-                code.addStatement("requireDistinct($L, $L, $S)", results.get(s), results.get(r),
+                code.addStatement(
+                        "requireDistinct($L, $L, $S)",
+                        results.get(s),
+                        results.get(r),
                         results.get(s) + " and " + results.get(r));
             }
         }
@@ -55,10 +58,16 @@ final class ArgumentChecks {
         }
         for (int r = 1; r < results.size(); r++) {
             for (int s = 0; s < r; s++) {
-                code.beginControlFlow("if ($1L == $2L && $3L < $4L + $5L && $4L < $3L + $6L)",
-                        results.get(s), results.get(r), to.apply(s), to.apply(r),
-                        context.lengthConstant(r), context.lengthConstant(s));
-                code.addStatement("throw new IllegalArgumentException($S)",
+                code.beginControlFlow(
+                        "if ($1L == $2L && $3L < $4L + $5L && $4L < $3L + $6L)",
+                        results.get(s),
+                        results.get(r),
+                        to.apply(s),
+                        to.apply(r),
+                        context.lengthConstant(r),
+                        context.lengthConstant(s));
+                code.addStatement(
+                        "throw new IllegalArgumentException($S)",
                         results.get(s) + " and " + results.get(r) + " overlap in one array");
                 code.endControlFlow();
             }
@@ -80,8 +89,11 @@ final class ArgumentChecks {
                         .addParameter(int.class, "length")
                         .addParameter(int.class, "required")
                         .beginControlFlow("if (length != required)")
-                        .addStatement("throw new $T(name + $S + length + $S + required)",
-                                IllegalArgumentException.class, " has length ", ", not the required ")
+                        .addStatement(
+                                "throw new $T(name + $S + length + $S + required)",
+                                IllegalArgumentException.class,
+                                " has length ",
+                                ", not the required ")
                         .endControlFlow()
                         .build());
         context.type()
@@ -91,8 +103,12 @@ final class ArgumentChecks {
                         .addParameter(int.class, "from")
                         .addParameter(int.class, "count")
                         .beginControlFlow("if (from < 0 || from > length - count)")
-                        .addStatement("throw new $T(name + $S + length + $S + count + $S + from)",
-                                IllegalArgumentException.class, " has length ", ", too short for ", " entries from ")
+                        .addStatement(
+                                "throw new $T(name + $S + length + $S + count + $S + from)",
+                                IllegalArgumentException.class,
+                                " has length ",
+                                ", too short for ",
+                                " entries from ")
                         .endControlFlow()
                         .build());
         if (distinct) {
@@ -102,8 +118,10 @@ final class ArgumentChecks {
                             .addParameter(double[].class, "b")
                             .addParameter(String.class, "names")
                             .beginControlFlow("if (a == b)")
-                            .addStatement("throw new $T(names + $S)",
-                                    IllegalArgumentException.class, " are one array, but each result needs its own")
+                            .addStatement(
+                                    "throw new $T(names + $S)",
+                                    IllegalArgumentException.class,
+                                    " are one array, but each result needs its own")
                             .endControlFlow()
                             .build());
         }

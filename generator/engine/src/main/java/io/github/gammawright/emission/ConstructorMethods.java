@@ -45,9 +45,9 @@ final class ConstructorMethods {
         for (int i = context.kept().nextSetBit(0); i >= 0; i = context.kept().nextSetBit(i + 1)) {
             String name = context.values().variable(i);
             context.type()
-                    .addField(FieldSpec.builder(
-                                    double.class, name, Modifier.PRIVATE, Modifier.FINAL, Modifier.TRANSIENT)
-                            .build());
+                    .addField(
+                            FieldSpec.builder(double.class, name, Modifier.PRIVATE, Modifier.FINAL, Modifier.TRANSIENT)
+                                    .build());
             context.values().give(i, name);
         }
         noArguments();
@@ -74,8 +74,7 @@ final class ConstructorMethods {
     private void define(BitSet values, ExpressionPrinter printer, CodeBlock.Builder code) {
         for (int i = values.nextSetBit(0); i >= 0; i = values.nextSetBit(i + 1)) {
             String type = context.kept().get(i) ? "" : "double ";
-            code.add("$L;\n",
-                    LineBreaks.wrap(type + context.values().variable(i) + " = " + printer.definition(i)));
+            code.add("$L;\n", LineBreaks.wrap(type + context.values().variable(i) + " = " + printer.definition(i)));
         }
     }
 
@@ -92,11 +91,14 @@ final class ConstructorMethods {
         }
         for (int i = behind.nextSetBit(0); i >= 0; i = behind.nextSetBit(i + 1)) {
             if (context.program().instruction(i) instanceof Instruction.Load load) {
-                values.add(CodeBlock.of("$S + $L", load.symbol().name() + " = ", context.values().given(i)));
+                values.add(CodeBlock.of(
+                        "$S + $L",
+                        load.symbol().name() + " = ",
+                        context.values().given(i)));
             }
         }
-        message.add("$S", "the parameters do not meet the condition " + condition.text()
-                + (values.isEmpty() ? "" : ": "));
+        message.add(
+                "$S", "the parameters do not meet the condition " + condition.text() + (values.isEmpty() ? "" : ": "));
         for (int i = 0; i < values.size(); i++) {
             message.add(i == 0 ? " + $L" : " + \", \" + $L", values.get(i));
         }
@@ -104,15 +106,18 @@ final class ConstructorMethods {
     }
 
     private void noArguments() {
-        List<MetricDefinition.Parameter> parameters = context.model().definition().parameters();
-        boolean defaults = parameters.stream().allMatch(p -> p.defaultExpression().isPresent());
+        List<MetricDefinition.Parameter> parameters =
+                context.model().definition().parameters();
+        boolean defaults =
+                parameters.stream().allMatch(p -> p.defaultExpression().isPresent());
         if (!defaults || !context.model().definition().functions().isEmpty()) {
             return;
         }
         MethodSpec.Builder constructor = MethodSpec.constructorBuilder().addModifiers(Modifier.PUBLIC);
         if (!parameters.isEmpty()) {
             List<String> values = parameters.stream()
-                    .map(p -> DoubleLiteral.of(DefaultValue.of(p.defaultExpression().orElseThrow())))
+                    .map(p -> DoubleLiteral.of(
+                            DefaultValue.of(p.defaultExpression().orElseThrow())))
                     .toList();
             constructor.addStatement("this($L)", String.join(", ", values));
             context.type().addMethod(constructor.build());

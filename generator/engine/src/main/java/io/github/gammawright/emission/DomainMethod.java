@@ -45,8 +45,9 @@ final class DomainMethod {
             BitSet needed = variablesOf(condition, context.program(), inlining);
             needed.and(pending);
             for (int i = needed.nextSetBit(0); i >= 0; i = needed.nextSetBit(i + 1)) {
-                code.add("$L;\n", LineBreaks.wrap(
-                        "double " + context.values().variable(i) + " = " + printer.definition(i)));
+                code.add(
+                        "$L;\n",
+                        LineBreaks.wrap("double " + context.values().variable(i) + " = " + printer.definition(i)));
             }
             pending.andNot(needed);
             code.beginControlFlow("if (!($L))", comparisons(condition, printer));

@@ -52,9 +52,7 @@ final class DoubleLiteral {
     private static String text(BigDecimal value) {
         int exponent = value.precision() - value.scale() - 1;
         if (exponent >= -3 && exponent < 10) {
-            return value.scale() <= 0
-                    ? value.toBigIntegerExact() + ".0"
-                    : value.toPlainString();
+            return value.scale() <= 0 ? value.toBigIntegerExact() + ".0" : value.toPlainString();
         }
         String digits = value.unscaledValue().abs().toString();
         String fraction = digits.length() > 1 ? digits.substring(1) : "0";

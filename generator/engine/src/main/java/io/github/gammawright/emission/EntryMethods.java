@@ -52,8 +52,9 @@ final class EntryMethods {
     }
 
     private void valuesAt() {
-        MethodSpec.Builder method =
-                MethodSpec.methodBuilder("valuesAt").addModifiers(Modifier.PUBLIC).returns(double[].class);
+        MethodSpec.Builder method = MethodSpec.methodBuilder("valuesAt")
+                .addModifiers(Modifier.PUBLIC)
+                .returns(double[].class);
         inputs(method);
         String result = context.names().results().get(0);
         method.addStatement("double[] $L = new double[LENGTH]", result);
@@ -91,8 +92,7 @@ final class EntryMethods {
     }
 
     private void evaluateScalars() {
-        MethodSpec.Builder method =
-                MethodSpec.methodBuilder("evaluateScalars").addModifiers(Modifier.PUBLIC);
+        MethodSpec.Builder method = MethodSpec.methodBuilder("evaluateScalars").addModifiers(Modifier.PUBLIC);
         for (KernelInput input : context.names().inputs()) {
             context.names().scalars(input).forEach(name -> method.addParameter(double.class, name));
         }

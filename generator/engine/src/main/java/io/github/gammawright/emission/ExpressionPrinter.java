@@ -99,8 +99,7 @@ final class ExpressionPrinter {
             for (int argument : call.operands()) {
                 arguments.add(operand(argument).text());
             }
-            return new Text(
-                    functions.callee(call.function()) + "(" + String.join(", ", arguments) + ")", Level.ATOM);
+            return new Text(functions.callee(call.function()) + "(" + String.join(", ", arguments) + ")", Level.ATOM);
         }
         if (instruction instanceof Instruction.Arithmetic arithmetic) {
             Text left = operand(arithmetic.left());

@@ -70,7 +70,10 @@ final class IndexMethods {
         for (int i = 0; i < indices.size(); i++) {
             String index = indices.get(i);
             String counted = shape.first() == 0 ? index : index + " - " + shape.first();
-            code.addStatement("$T.checkIndex($L, $L)", Objects.class, counted,
+            code.addStatement(
+                    "$T.checkIndex($L, $L)",
+                    Objects.class,
+                    counted,
                     shape.extents().get(i));
         }
         StringBuilder position = new StringBuilder();
@@ -82,7 +85,10 @@ final class IndexMethods {
                 String former = position.toString();
                 position.setLength(0);
                 position.append(i == 1 && shape.first() == 0 ? former : "(" + former + ")");
-                position.append(" * ").append(shape.extents().get(i)).append(" + ").append(counted);
+                position.append(" * ")
+                        .append(shape.extents().get(i))
+                        .append(" + ")
+                        .append(counted);
             }
         }
         if (triangle) {
@@ -91,7 +97,8 @@ final class IndexMethods {
             String j = indices.get(shape.rank() - 1);
             code.addStatement("int row = Math.max($L, $L)", i, j);
             code.addStatement("int column = Math.min($L, $L)", i, j);
-            String former = rows == 0 ? "" : (rows == 1 ? position : "(" + position + ")") + " * " + n * (n + 1) / 2 + " + ";
+            String former =
+                    rows == 0 ? "" : (rows == 1 ? position : "(" + position + ")") + " * " + n * (n + 1) / 2 + " + ";
             position = new StringBuilder(former + "row * (row + 1) / 2 + column");
         }
         code.addStatement("int position = $L", position.isEmpty() ? "0" : position);
@@ -101,7 +108,8 @@ final class IndexMethods {
     private static void lookUp(KernelModel.Result result, MethodSpec.Builder method) {
         method.beginControlFlow("return switch (position)");
         for (int slot = 0; slot < result.components().size(); slot++) {
-            int[] tuple = result.components().get(slot).stream().mapToInt(i -> i).toArray();
+            int[] tuple =
+                    result.components().get(slot).stream().mapToInt(i -> i).toArray();
             method.addCode("case $L -> $L;\n", result.shape().packedIndex(tuple), slot);
         }
         method.addCode("default -> -1;\n");

@@ -17,7 +17,6 @@ final class Inlining {
     private static final int MOST_OPERATORS = 5;
 
     private final StraightLineProgram program;
-    private final IntPredicate atHand;
     private final BitSet live = new BitSet();
     private final BitSet variables = new BitSet();
     private final int[] uses;
@@ -31,7 +30,6 @@ final class Inlining {
      */
     Inlining(StraightLineProgram program, List<Integer> roots, IntPredicate atHand, BitSet forced) {
         this.program = program;
-        this.atHand = atHand;
         this.uses = new int[program.size()];
         for (int root : roots) {
             uses[root]++;

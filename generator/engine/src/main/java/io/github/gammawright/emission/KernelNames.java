@@ -13,10 +13,39 @@ import java.util.Map;
 final class KernelNames {
 
     private static final List<String> MEMBERS = List.of(
-            "DIMENSION", "LENGTH", "WORKSPACE_LENGTH", "serialVersionUID", "functions", "constants", "workspace",
-            "evaluate", "evaluateAt", "evaluateWith", "evaluateScalars", "evaluateBatch", "valuesAt", "inDomain",
-            "index", "sign", "compute", "requireLength", "requireRange", "requireDistinct", "readResolve", "at",
-            "from", "to", "results", "values", "array", "length", "name", "x", "packed", "i_", "operands");
+            "DIMENSION",
+            "LENGTH",
+            "WORKSPACE_LENGTH",
+            "serialVersionUID",
+            "functions",
+            "constants",
+            "workspace",
+            "evaluate",
+            "evaluateAt",
+            "evaluateWith",
+            "evaluateScalars",
+            "evaluateBatch",
+            "valuesAt",
+            "inDomain",
+            "index",
+            "sign",
+            "compute",
+            "requireLength",
+            "requireRange",
+            "requireDistinct",
+            "readResolve",
+            "at",
+            "from",
+            "to",
+            "results",
+            "values",
+            "array",
+            "length",
+            "name",
+            "x",
+            "packed",
+            "i_",
+            "operands");
 
     private final NameAllocator allocator = new NameAllocator();
     private final String className;

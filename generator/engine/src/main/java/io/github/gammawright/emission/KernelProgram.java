@@ -15,8 +15,7 @@ import java.util.TreeMap;
  * @param slots for each result the number of the instruction behind each entry, −1 for zero
  * @param conditions with operands that refer to the common program
  */
-record KernelProgram(
-        StraightLineProgram program, List<List<Integer>> slots, List<KernelModel.Condition> conditions) {
+record KernelProgram(StraightLineProgram program, List<List<Integer>> slots, List<KernelModel.Condition> conditions) {
 
     static KernelProgram of(KernelModel model) {
         List<Instruction> instructions = new ArrayList<>(model.program().instructions());

@@ -38,7 +38,11 @@ final class StatementPrinter {
         } else if (statement instanceof Statement.Zero zero) {
             ArrayTarget array = arrays.get(zero.array());
             if (zero.to() - zero.from() >= LONG_RUN) {
-                code.add("$T.fill($L, $L, $L, 0.0);\n", Arrays.class, array.name(), array.position(zero.from()),
+                code.add(
+                        "$T.fill($L, $L, $L, 0.0);\n",
+                        Arrays.class,
+                        array.name(),
+                        array.position(zero.from()),
                         array.position(zero.to()));
             } else {
                 for (int slot = zero.from(); slot < zero.to(); slot++) {

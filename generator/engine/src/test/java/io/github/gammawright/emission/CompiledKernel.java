@@ -22,9 +22,8 @@ final class CompiledKernel {
 
     static CompiledKernel of(KernelModel model) {
         String source = KernelEmitter.emit(model);
-        String qualified = model.packageName().isEmpty()
-                ? model.className()
-                : model.packageName() + "." + model.className();
+        String qualified =
+                model.packageName().isEmpty() ? model.className() : model.packageName() + "." + model.className();
         Map<String, byte[]> files = MemoryCompiler.compile(qualified, source);
         return new CompiledKernel(source, files, MemoryCompiler.load(files, qualified));
     }
@@ -37,7 +36,7 @@ final class CompiledKernel {
                 } catch (InvocationTargetException e) {
                     throw unchecked(e.getCause());
                 } catch (ReflectiveOperationException e) {
-                    throw new AssertionError(e);
+                    throw new LinkageError(e.getMessage(), e);
                 }
             }
         }
@@ -56,7 +55,7 @@ final class CompiledKernel {
         } catch (InvocationTargetException e) {
             throw unchecked(e.getCause());
         } catch (IllegalAccessException e) {
-            throw new AssertionError(e);
+            throw new LinkageError(e.getMessage(), e);
         }
     }
 
@@ -64,7 +63,7 @@ final class CompiledKernel {
         try {
             return type.getField(name).getInt(null);
         } catch (ReflectiveOperationException e) {
-            throw new AssertionError(e);
+            throw new LinkageError(e.getMessage(), e);
         }
     }
 

@@ -53,8 +53,8 @@ final class MemoryCompiler {
                 };
         String simpleName = qualifiedName.substring(qualifiedName.lastIndexOf('.') + 1);
         JavaFileObject unit =
-                new SimpleJavaFileObject(URI.create("memory:///" + encoded(simpleName) + ".java"),
-                        JavaFileObject.Kind.SOURCE) {
+                new SimpleJavaFileObject(
+                        URI.create("memory:///" + encoded(simpleName) + ".java"), JavaFileObject.Kind.SOURCE) {
                     @Override
                     public CharSequence getCharContent(boolean ignoreEncodingErrors) {
                         return source;
@@ -65,9 +65,13 @@ final class MemoryCompiler {
                         return simple.equals(simpleName) && kind == JavaFileObject.Kind.SOURCE;
                     }
                 };
-        boolean done = compiler.getTask(null, files, diagnostics,
+        boolean done = compiler.getTask(
+                        null,
+                        files,
+                        diagnostics,
                         List.of("--release", "17", "-Xlint:all", "-Xdoclint:all,-missing", "-Werror", "-proc:none"),
-                        null, List.of(unit))
+                        null,
+                        List.of(unit))
                 .call();
         if (!done) {
             throw new AssertionError(diagnostics.getDiagnostics() + "\n" + source);
@@ -95,7 +99,7 @@ final class MemoryCompiler {
         try {
             return Class.forName(name, true, loader);
         } catch (ClassNotFoundException e) {
-            throw new AssertionError(e);
+            throw new LinkageError(e.getMessage(), e);
         }
     }
 }

@@ -54,10 +54,7 @@ final class Schwarzschild {
         TestProgram d = model.domain;
         model.condition(d.parameter("M", 0), Comparison.GREATER, d.constant(0), "M > 0");
         model.condition(
-                d.coordinate("r", 1),
-                Comparison.GREATER,
-                d.multiply(d.constant(2), d.parameter("M", 0)),
-                "r > 2*M");
+                d.coordinate("r", 1), Comparison.GREATER, d.multiply(d.constant(2), d.parameter("M", 0)), "r > 2*M");
         model.conditions.add(new KernelModel.Condition(
                 List.of(d.constant(0), d.coordinate("theta", 2), d.pi()),
                 List.of(Comparison.LESS, Comparison.LESS),
@@ -72,7 +69,6 @@ final class Schwarzschild {
 
     static double[] values(StraightLineProgram program, double mass, double... point) {
         return DoubleInterpreter.run(
-                program,
-                symbol -> symbol.kind() == Symbol.Kind.PARAMETER ? mass : point[symbol.index()]);
+                program, symbol -> symbol.kind() == Symbol.Kind.PARAMETER ? mass : point[symbol.index()]);
     }
 }

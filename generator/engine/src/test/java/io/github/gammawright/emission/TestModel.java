@@ -39,18 +39,17 @@ final class TestModel {
     static Expression number(String decimal) {
         return new Expression.Number(
                 new BigFraction(new java.math.BigDecimal(decimal).unscaledValue())
-                        .divide(new BigFraction(java.math.BigInteger.TEN.pow(new java.math.BigDecimal(decimal).scale()))),
+                        .divide(new BigFraction(
+                                java.math.BigInteger.TEN.pow(new java.math.BigDecimal(decimal).scale()))),
                 NOWHERE);
     }
 
     static Expression power(Expression base, int exponent) {
-        return new Expression.Binary(
-                Expression.Operator.POWER, base, number(Integer.toString(exponent)), NOWHERE);
+        return new Expression.Binary(Expression.Operator.POWER, base, number(Integer.toString(exponent)), NOWHERE);
     }
 
     TestModel parameter(String parameter, Expression defaultValue) {
-        parameters.add(new MetricDefinition.Parameter(
-                parameter, Optional.ofNullable(defaultValue), "", "", NOWHERE));
+        parameters.add(new MetricDefinition.Parameter(parameter, Optional.ofNullable(defaultValue), "", "", NOWHERE));
         return this;
     }
 

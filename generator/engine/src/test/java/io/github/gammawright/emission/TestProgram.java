@@ -38,8 +38,7 @@ final class TestProgram {
     }
 
     int function(String name, int index, Integer... orders) {
-        return append(
-                new Instruction.Load(new Symbol(Symbol.Kind.CALLER_FUNCTION, name, index, List.of(orders))));
+        return append(new Instruction.Load(new Symbol(Symbol.Kind.CALLER_FUNCTION, name, index, List.of(orders))));
     }
 
     int constant(long numerator, long denominator) {

@@ -189,6 +189,18 @@ class LauncherTest {
     }
 
     @Test
+    void anUnusableArchiveOfClassesGoesUnnoticed() throws Exception {
+        run(Map.of());
+        Path archive = root.resolve("generator/command-line/target/launcher.jsa");
+        Files.delete(archive);
+        Files.writeString(archive, "made by another JDK");
+        Run run = run(Map.of(), "x");
+
+        assertThat(run.output()).startsWith("x");
+        assertThat(run.errors()).isEmpty();
+    }
+
+    @Test
     void takesOverTheLockOfALauncherThatDied() throws Exception {
         Process dead = new ProcessBuilder("true").start();
         dead.waitFor();

@@ -82,7 +82,7 @@ final class MetricSeries {
         return metric;
     }
 
-    /** g_tt = −α² + γ_ij β^i β^j, g_ti = γ_ij β^j, g_ij = γ_ij (Arnowitt, Deser & Misner 1962). */
+    /** g_tt = −α² + γ_ij β^i β^j, g_ti = γ_ij β^j, g_ij = γ_ij (Arnowitt, Deser &amp; Misner 1962). */
     private Taylor[][] threePlusOne(MetricForm.ThreePlusOne form) {
         int n = definition.dimension();
         Taylor[][] metric = n == 1

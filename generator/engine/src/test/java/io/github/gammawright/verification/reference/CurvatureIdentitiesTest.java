@@ -9,7 +9,7 @@ import java.util.List;
 import org.junit.jupiter.api.Test;
 
 /**
- * Identities of the connection and the curvature (Misner, Thorne & Wheeler 1973, chapters 8 and 13; equation numbers not
+ * Identities of the connection and the curvature (Misner, Thorne &amp; Wheeler 1973, chapters 8 and 13; equation numbers not
  * checked) on metrics with and without symmetries.
  */
 class CurvatureIdentitiesTest {

@@ -27,7 +27,7 @@ class ElementaryFunctionsTest {
     private static final DfpField FIELD = new DfpField(120);
 
     /**
-     * Constants as tables give them (for instance Abramowitz & Stegun 1964, table 1.1, to fewer digits; here from
+     * Constants as tables give them (for instance Abramowitz &amp; Stegun 1964, table 1.1, to fewer digits; here from
      * memory), 50 digits.
      */
     @ParameterizedTest

@@ -34,6 +34,7 @@ public final class ExpressionGraph {
     private final Map<Node, String> names = new LinkedHashMap<>();
     private final BitSet kept = new BitSet();
     private final Fingerprints fingerprints = new Fingerprints();
+    private final SamplePoints samplePoints;
     private final RealValues realValues;
     private boolean hasBranches;
 
@@ -47,6 +48,7 @@ public final class ExpressionGraph {
 
     /** A graph whose symbols range over a domain of which a few points are given. */
     public ExpressionGraph(SamplePoints samplePoints) {
+        this.samplePoints = samplePoints;
         this.realValues = new RealValues(samplePoints);
         this.one = constant(BigFraction.ONE);
         this.zero = constant(BigFraction.ZERO);
@@ -163,6 +165,26 @@ public final class ExpressionGraph {
     /** The approximate values of a node at the sample points. */
     public double[] realValues(Node node) {
         return realValues.of(node).clone();
+    }
+
+    /** Where the approximate values are taken. */
+    public SamplePoints samplePoints() {
+        return samplePoints;
+    }
+
+    /**
+     * Whether two values, both of this graph, are the same function as far as their fingerprints tell and, where the
+     * graph has roots or absolute values, as far as their values at the sample points tell besides.
+     */
+    public boolean agree(Node a, Node b) {
+        return a == b
+                || (Arrays.equals(fingerprints.of(a), fingerprints.of(b))
+                        && (!hasBranches || realValues.agree(a, b, 1)));
+    }
+
+    /** The values that have a name, in the order in which they got it. */
+    public Map<Node, String> names() {
+        return java.util.Collections.unmodifiableMap(names);
     }
 
     /** a + b. */

@@ -37,7 +37,10 @@ class NormalFormsTest {
         Node denominator = graph.sum(List.of(
                 graph.power(x, 2), graph.multiple(new BigFraction(-2), graph.multiply(x, y)), graph.power(y, 2)));
         Node found = factored(graph.divide(numerator, denominator));
-        assertThat(factors(found)).hasSize(2).anyMatch(Node.Sum.class::isInstance).anyMatch(Node.Power.class::isInstance);
+        assertThat(factors(found))
+                .hasSize(2)
+                .anyMatch(Node.Sum.class::isInstance)
+                .anyMatch(Node.Power.class::isInstance);
     }
 
     @Test

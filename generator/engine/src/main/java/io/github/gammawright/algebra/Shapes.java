@@ -61,8 +61,8 @@ final class Shapes {
                         polynomials.variable(abbreviation.variable(), 1),
                         abbreviation.coefficient().getDenominator().negate()));
         for (ExpVector term : polynomial.getMap().keySet()) {
-            boolean alone =
-                    polynomial.getMap().keySet().stream().noneMatch(other -> other != term && other.multipleOf(term));
+            boolean alone = polynomial.getMap().keySet().stream()
+                    .noneMatch(other -> !other.equals(term) && other.multipleOf(term));
             if (alone && !term.isZERO()) {
                 BigInteger coefficient = equation.coefficient(term);
                 GenPolynomial<BigInteger> rest =

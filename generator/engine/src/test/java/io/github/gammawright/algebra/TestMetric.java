@@ -7,6 +7,7 @@ import io.github.gammawright.graph.RealFunction;
 import io.github.gammawright.graph.Symbol;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.SortedMap;
 import java.util.TreeMap;
 import org.hipparchus.fraction.BigFraction;
 
@@ -84,10 +85,10 @@ final class TestMetric {
     }
 
     /** Γ^k_ij by "kij", those with i ≤ j that are not zero. */
-    TreeMap<String, Node> christoffel() {
+    SortedMap<String, Node> christoffel() {
         Differentiation differentiation = new Differentiation(graph);
         int n = coordinates.size();
-        TreeMap<String, Node> symbols = new TreeMap<>();
+        SortedMap<String, Node> symbols = new TreeMap<>();
         for (int k = 0; k < n; k++) {
             for (int i = 0; i < n; i++) {
                 for (int j = i; j < n; j++) {

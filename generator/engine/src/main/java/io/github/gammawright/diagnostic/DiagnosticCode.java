@@ -164,6 +164,17 @@ public enum DiagnosticCode {
     RANGE_OF_NOTHING(Subject.TEXT, "'{0}' is {1}; only coordinates and parameters have a sample range", ""),
     JAVA_NAME_INVALID(Subject.TEXT, "'{0}' is not the name of a Java {1}", "{2}"),
 
+    // What is to be made
+    QUANTITY_TWICE(Subject.TEXT, "the quantity '{0}' is given twice", "Remove one of the two."),
+    CLASS_DUPLICATE(
+            Subject.TEXT,
+            "the class {0} is already made by {1}",
+            "Give it another name with 'class' in a [[kernel]] table, or another package."),
+    CLASS_DIFFERS_IN_CASE(
+            Subject.TEXT,
+            "the class {0} differs only in case from {1}, made by {2}, and some file systems cannot tell them apart",
+            "Give it another name with 'class' in a [[kernel]] table, or another package."),
+
     TOO_MANY_MISTAKES(Subject.NOTHING, "{0} more mistakes are not shown", "Mend the first {1} and run again.");
 
     private enum Subject {

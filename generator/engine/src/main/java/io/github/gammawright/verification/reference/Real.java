@@ -162,6 +162,25 @@ public final class Real {
                 : mantissa.compareTo(other.mantissa.shiftLeft((int) -gap));
     }
 
+    /** |x − value| to the precision of a double; NaN when one of them is undefined. */
+    public double distanceTo(double value) {
+        Real other = of(value);
+        if (this == UNDEFINED || other == UNDEFINED) {
+            return Double.NaN;
+        }
+        if (mantissa.signum() == 0 || magnitude() < -5000) {
+            return Math.abs(value);
+        }
+        if (other.mantissa.signum() == 0 || magnitude() > 5000) {
+            return abs().toDouble();
+        }
+        int shift = Math.toIntExact(exponent - other.exponent);
+        BigInteger difference = shift >= 0
+                ? mantissa.shiftLeft(shift).subtract(other.mantissa)
+                : mantissa.subtract(other.mantissa.shiftLeft(-shift));
+        return of(difference.abs(), Math.min(exponent, other.exponent)).toDouble();
+    }
+
     /** The nearest double, ties to even; NaN when undefined, an infinity beyond the range of doubles. */
     public double toDouble() {
         if (this == UNDEFINED) {

@@ -72,8 +72,19 @@ public final class ReferenceEvaluator {
 
     /** Whether all conditions of the definition's domain hold; a comparison with an undefined number does not. */
     public boolean inDomain(double[] parameters, double[] point) {
+        return firstFailedCondition(parameters, point) < 0;
+    }
+
+    /** The number of the first condition that does not hold, −1 when all do. */
+    public int firstFailedCondition(double[] parameters, double[] point) {
         MetricSeries series = at(parameters, point).plainSeries(0);
-        return definition.domain().conditions().stream().allMatch(condition -> holds(condition, series));
+        List<Condition> conditions = definition.domain().conditions();
+        for (int i = 0; i < conditions.size(); i++) {
+            if (!holds(conditions.get(i), series)) {
+                return i;
+            }
+        }
+        return -1;
     }
 
     private static boolean holds(Condition condition, MetricSeries series) {
@@ -110,6 +121,46 @@ public final class ReferenceEvaluator {
                     .orElse(OptionalDouble.empty()));
         }
         return List.copyOf(defaults);
+    }
+
+    /**
+     * Partial derivatives of a caller's function, from its sample.
+     *
+     * @param function its name
+     * @param arguments one for each of its own arguments, in their order
+     * @param orders for each derivative wanted, how often to differentiate by each argument; all 0 for the value
+     */
+    public List<Real> functionDerivatives(
+            String function, double[] parameters, double[] arguments, List<List<Integer>> orders) {
+        MetricDefinition.CallerFunction declared = definition.functions().stream()
+                .filter(f -> f.name().equals(function))
+                .findFirst()
+                .orElseThrow(() -> new IllegalArgumentException("there is no function " + function));
+        requireLength("arguments of " + function, arguments, declared.of().size());
+        int order = orders.stream()
+                .mapToInt(o -> o.stream().mapToInt(Integer::intValue).sum())
+                .max()
+                .orElse(0);
+        TaylorRing ring = ring(arguments.length, order);
+        ExpressionEvaluator evaluator = new ExpressionEvaluator(ring, definition.dimension());
+        for (int i = 0; i < parameters.length; i++) {
+            evaluator.define(definition.parameters().get(i).name(), ring.constant(Real.of(parameters[i])));
+        }
+        for (int i = 0; i < arguments.length; i++) {
+            evaluator.define(declared.of().get(i), ring.variable(i, Real.of(arguments[i])));
+        }
+        Taylor series = declared.sample().map(evaluator::scalar).orElseGet(ring::undefined);
+        List<Real> derivatives = new ArrayList<>();
+        for (List<Integer> wanted : orders) {
+            Taylor derivative = series;
+            for (int i = 0; i < arguments.length; i++) {
+                for (int k = 0; k < wanted.get(i); k++) {
+                    derivative = derivative.derivative(i);
+                }
+            }
+            derivatives.add(derivative.value());
+        }
+        return List.copyOf(derivatives);
     }
 
     /** Series in so many variables, the first of them the coordinates. */

@@ -54,6 +54,9 @@ record SlotMap(int length, List<Entry> entries) {
         int rank = extents.size();
         int components = extents.stream().reduce(1, Math::multiplyExact);
         List<Entry> entries = new ArrayList<>();
+        if (quantity.isCurvature() && layout != Layout.FULL) {
+            return curvature(n, layout, classLength, classIndex);
+        }
         int packed = 0;
         for (int component = 0; component < components; component++) {
             int[] indices = indices(component, extents);
@@ -74,6 +77,26 @@ record SlotMap(int length, List<Entry> entries) {
             case NON_ZERO -> classLength;
         };
         return new SlotMap(length, entries);
+    }
+
+    /** Pairs A = k(k−1)/2 + l, k &gt; l, and B alike, at A(A+1)/2 + B for A ≥ B. */
+    private static SlotMap curvature(int n, Layout layout, int classLength, ClassIndex classIndex) {
+        List<Entry> entries = new ArrayList<>();
+        for (int k = 1; k < n; k++) {
+            for (int l = 0; l < k; l++) {
+                int a = k * (k - 1) / 2 + l;
+                for (int i = 1; i <= k; i++) {
+                    for (int j = 0; j < i; j++) {
+                        int b = i * (i - 1) / 2 + j;
+                        if (b <= a) {
+                            int slot = layout == Layout.PACKED ? a * (a + 1) / 2 + b : classIndex.of(k, l, i, j);
+                            entries.add(new Entry(List.of(k, l, i, j), ((k * n + l) * n + i) * n + j, slot));
+                        }
+                    }
+                }
+            }
+        }
+        return new SlotMap(layout == Layout.PACKED ? entries.size() : classLength, entries);
     }
 
     private static int packed(int[] indices, List<Integer> extents, boolean symmetric) {

@@ -6,6 +6,7 @@ import io.github.gammawright.geometry.Layout;
 import io.github.gammawright.verification.SlotMap.Entry;
 import io.github.gammawright.verification.reference.ReferenceQuantity;
 import java.util.List;
+import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
 
 class SlotMapTest {
@@ -45,6 +46,21 @@ class SlotMapTest {
         SlotMap map = SlotMap.of(ReferenceQuantity.SHIFT_DERIVATIVE, 4, Layout.PACKED, 0, UNUSED, 1);
         assertThat(map.length()).isEqualTo(9);
         assertThat(map.entries()).allMatch(entry -> entry.slot() == entry.component());
+    }
+
+    /** N(N+1)/2 entries with N = n(n−1)/2: 21 for n = 4. */
+    @Test
+    void packedCurvatureStoresPairsOfPairsOnce() {
+        SlotMap map = SlotMap.of(ReferenceQuantity.LOWERED_RIEMANN, 4, Layout.PACKED, 0, UNUSED, 0);
+        assertThat(map.length()).isEqualTo(21);
+        assertThat(map.entries().stream().map(Entry::slot))
+                .containsExactlyInAnyOrderElementsOf(
+                        IntStream.range(0, 21).boxed().toList());
+        assertThat(map.entries())
+                .contains(
+                        new Entry(List.of(1, 0, 1, 0), 68, 0),
+                        new Entry(List.of(2, 1, 2, 0), 152, 4),
+                        new Entry(List.of(3, 2, 3, 2), 238, 20));
     }
 
     @Test

@@ -34,6 +34,8 @@ final class QuantityFormulas {
             case GEODESIC_DEVIATION -> ReferenceMotion.deviation(geometry, inputs.get(0), inputs.get(1));
             case RIEMANN -> flat(new ReferenceCurvature(geometry).riemann());
             case WEYL -> flat(new ReferenceCurvature(geometry).weyl());
+            case LOWERED_RIEMANN -> flat(new ReferenceCurvature(geometry).loweredRiemann());
+            case LOWERED_WEYL -> flat(new ReferenceCurvature(geometry).loweredWeyl());
             case RICCI -> flat(new ReferenceCurvature(geometry).ricci());
             case RICCI_SCALAR -> one(new ReferenceCurvature(geometry).scalar());
             case EINSTEIN -> flat(new ReferenceCurvature(geometry).einstein());

@@ -51,24 +51,34 @@ final class ReferenceCurvature {
     }
 
     /** R_klij = g_km R^m_lij; k, l, i, j. */
-    Taylor[][][][] lowered() {
-        Taylor[][][][] mixed = riemann();
-        Taylor[][] metric = geometry.metric();
-        Taylor[][][][] lowered = new Taylor[n][n][n][n];
+    Taylor[][][][] loweredRiemann() {
+        return contracted(geometry.metric(), riemann(), false);
+    }
+
+    /** C_klij = g_km C^m_lij; k, l, i, j. */
+    Taylor[][][][] loweredWeyl() {
+        return contracted(geometry.metric(), weyl(), false);
+    }
+
+    /** a_km t_mlij, or with the second index instead a_lm t_kmij. */
+    private Taylor[][][][] contracted(Taylor[][] a, Taylor[][][][] t, boolean second) {
+        Taylor[][][][] contracted = new Taylor[n][n][n][n];
         for (int k = 0; k < n; k++) {
             for (int l = 0; l < n; l++) {
                 for (int i = 0; i < n; i++) {
                     for (int j = 0; j < n; j++) {
                         Taylor sum = geometry.zero(order);
                         for (int m = 0; m < n; m++) {
-                            sum = ReferenceGeometry.plusProduct(sum, metric[k][m], mixed[m][l][i][j]);
+                            sum = second
+                                    ? ReferenceGeometry.plusProduct(sum, a[l][m], t[k][m][i][j])
+                                    : ReferenceGeometry.plusProduct(sum, a[k][m], t[m][l][i][j]);
                         }
-                        lowered[k][l][i][j] = sum;
+                        contracted[k][l][i][j] = sum;
                     }
                 }
             }
         }
-        return lowered;
+        return contracted;
     }
 
     /** R_lj = R^k_lkj. */
@@ -116,22 +126,7 @@ final class ReferenceCurvature {
      * R_klij R^klij. With the pairs of R^kl_ij the sum is R^kl_ij R^ij_kl, which needs one index of each raised only.
      */
     Taylor kretschmann() {
-        Taylor[][] inverse = geometry.inverse(order);
-        Taylor[][][][] mixed = riemann();
-        Taylor[][][][] raised = new Taylor[n][n][n][n];
-        for (int k = 0; k < n; k++) {
-            for (int l = 0; l < n; l++) {
-                for (int i = 0; i < n; i++) {
-                    for (int j = 0; j < n; j++) {
-                        Taylor sum = geometry.zero(order);
-                        for (int m = 0; m < n; m++) {
-                            sum = ReferenceGeometry.plusProduct(sum, inverse[l][m], mixed[k][m][i][j]);
-                        }
-                        raised[k][l][i][j] = sum;
-                    }
-                }
-            }
-        }
+        Taylor[][][][] raised = contracted(geometry.inverse(order), riemann(), true);
         Taylor sum = geometry.zero(order);
         for (int k = 0; k < n; k++) {
             for (int l = 0; l < n; l++) {

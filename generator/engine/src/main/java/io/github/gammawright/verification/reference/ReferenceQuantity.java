@@ -26,6 +26,10 @@ public enum ReferenceQuantity {
     GEODESIC_DEVIATION(2, Indices.VECTOR, Input.FULL, Input.FULL),
     RIEMANN(2, Indices.CURVATURE),
     WEYL(2, Indices.CURVATURE),
+    /** R_klij, all indices below: what the packed layout of {@link #RIEMANN} holds. */
+    LOWERED_RIEMANN(2, Indices.CURVATURE),
+    /** C_klij, all indices below: what the packed layout of {@link #WEYL} holds. */
+    LOWERED_WEYL(2, Indices.CURVATURE),
     RICCI(2, Indices.SYMMETRIC_2),
     RICCI_SCALAR(2, Indices.SCALAR),
     EINSTEIN(2, Indices.SYMMETRIC_2),
@@ -88,6 +92,23 @@ public enum ReferenceQuantity {
             case SPATIAL_MATRIX, SPATIAL_SYMMETRIC_2 -> List.of(n - 1, n - 1);
             case SPATIAL_SYMMETRIC_3 -> List.of(n - 1, n - 1, n - 1);
             case SPATIAL_PHASE -> List.of(2 * (n - 1));
+        };
+    }
+
+    /**
+     * Whether the components are those of a curvature tensor: k, l, i, j, antisymmetric in i and j and, with all indices
+     * below, in k and l, and symmetric under exchange of the pairs.
+     */
+    public boolean isCurvature() {
+        return indices == Indices.CURVATURE;
+    }
+
+    /** The quantity whose independent components the layouts other than the full one hold. */
+    public ReferenceQuantity packedForm() {
+        return switch (this) {
+            case RIEMANN -> LOWERED_RIEMANN;
+            case WEYL -> LOWERED_WEYL;
+            default -> this;
         };
     }
 

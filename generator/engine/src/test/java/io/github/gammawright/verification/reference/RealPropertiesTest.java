@@ -46,6 +46,14 @@ class RealPropertiesTest {
     }
 
     @Property
+    void distanceToADouble(@ForAll double a, @ForAll double b) {
+        double expected = new BigDecimal(a).subtract(new BigDecimal(b)).abs().doubleValue();
+        assertThat(Real.of(a).distanceTo(b)).isEqualTo(expected);
+        assertThat(Real.of(a).distanceTo(Double.NaN)).isNaN();
+        assertThat(Real.UNDEFINED.distanceTo(b)).isNaN();
+    }
+
+    @Property
     void orderIsThatOfDoubles(@ForAll double a, @ForAll double b) {
         assertThat(Real.of(a).isLessThan(Real.of(b))).isEqualTo(a < b);
         assertThat(Real.of(a).isAtMost(Real.of(b))).isEqualTo(a <= b);

@@ -12,10 +12,10 @@ import java.util.Map;
 import java.util.SplittableRandom;
 
 /** Points of a definition's sample box that meet its conditions, the same in every run. */
-final class DomainPoints implements SamplePoints {
+public final class DomainPoints implements SamplePoints {
 
-    private static final int WANTED = 6;
-    private static final int DRAWS = 4000;
+    private static final int FEW = 6;
+    private static final int DRAWS = 20000;
 
     private final List<Map<Symbol, Double>> points;
     private final SamplePoints others;
@@ -25,13 +25,18 @@ final class DomainPoints implements SamplePoints {
         this.others = SamplePoints.arbitrary(points.size());
     }
 
-    /** Points of the domain; arbitrary ones if none is found. */
+    /** A few points of the domain; arbitrary ones if none is found. */
     static SamplePoints draw(MetricDefinition definition) {
+        return draw(definition, FEW);
+    }
+
+    /** So many points of the domain; arbitrary ones if none is found. */
+    public static SamplePoints draw(MetricDefinition definition, int wanted) {
         DefinitionScope scope = new DefinitionScope(definition, SamplePoints.arbitrary(1));
         DomainProgram domain = DomainProgram.of(definition, scope);
         SplittableRandom random = new SplittableRandom(20_260_101L);
         List<Map<Symbol, Double>> points = new ArrayList<>();
-        for (int draw = 0; draw < DRAWS && points.size() < WANTED; draw++) {
+        for (int draw = 0; draw < DRAWS && points.size() < wanted; draw++) {
             Map<Symbol, Double> point = new HashMap<>();
             for (Symbol parameter : scope.parameters()) {
                 point.put(parameter, parameter(definition, parameter, random));
@@ -79,6 +84,11 @@ final class DomainPoints implements SamplePoints {
     @Override
     public double value(Symbol symbol, int point) {
         Double value = points.get(point).get(symbol);
-        return value != null ? value : others.value(symbol, point);
+        if (value != null) {
+            return value;
+        }
+        double other = others.value(symbol, point);
+        // the entries of vectors take both signs
+        return symbol.kind() == Symbol.Kind.CALLER_FUNCTION ? other : 2 * (other - 1);
     }
 }

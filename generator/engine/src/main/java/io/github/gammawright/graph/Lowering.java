@@ -20,6 +20,7 @@ public final class Lowering {
     private final ProgramBuilder program = new ProgramBuilder();
     private final Map<Node, Signed> lowered = new HashMap<>();
     private final Map<Node, Integer> reciprocalUses = new HashMap<>();
+    private final Map<Integer, Node> atoms = new HashMap<>();
 
     private Lowering(ExpressionGraph graph) {
         this.graph = graph;
@@ -34,13 +35,21 @@ public final class Lowering {
 
     /** A program whose outputs are the given values, in their order. */
     public static StraightLineProgram lower(ExpressionGraph graph, List<Node> outputs) {
+        return lowerWithValues(graph, outputs).program();
+    }
+
+    /** The same together with the prime-field values of what is not arithmetic. */
+    public static LoweredProgram lowerWithValues(ExpressionGraph graph, List<Node> outputs) {
         Lowering lowering = new Lowering(graph);
         lowering.countReciprocals(outputs);
         List<Integer> numbers = new ArrayList<>();
         for (Node output : outputs) {
             numbers.add(lowering.plain(lowering.lower(output)));
         }
-        return lowering.program.build(numbers);
+        // only now: a node made on the way may have had a point drawn anew
+        Map<Integer, long[]> values = new HashMap<>();
+        lowering.atoms.forEach((number, node) -> values.put(number, graph.fingerprint(node)));
+        return new LoweredProgram(lowering.program.build(numbers), values);
     }
 
     /** Counts in how many products each denominator occurs. */
@@ -99,10 +108,10 @@ public final class Lowering {
             return new Signed(program.constant(constant.value().abs()), negative);
         }
         if (node instanceof Node.Pi) {
-            return new Signed(program.append(new Instruction.Pi()), false);
+            return atom(node, new Instruction.Pi());
         }
         if (node instanceof Node.Leaf leaf) {
-            return new Signed(program.append(new Instruction.Load(leaf.symbol())), false);
+            return atom(node, new Instruction.Load(leaf.symbol()));
         }
         if (node instanceof Node.Multiple multiple) {
             return product(
@@ -121,10 +130,10 @@ public final class Lowering {
             return product(BigFraction.ONE, List.of(power));
         }
         if (node instanceof Node.ParameterPower power) {
-            return call(RealFunction.POW, power.operands());
+            return call(node, RealFunction.POW, power.operands());
         }
         Node.Call call = (Node.Call) node;
-        return call(call.function(), call.operands());
+        return call(node, call.function(), call.operands());
     }
 
     /** Whether a product under a multiple is worth keeping whole; a parameter-only coefficient is better merged. */
@@ -132,12 +141,19 @@ public final class Lowering {
         return graph.isKept(product) || lowered.containsKey(product);
     }
 
-    private Signed call(RealFunction function, List<Node> arguments) {
+    private Signed call(Node node, RealFunction function, List<Node> arguments) {
         List<Integer> numbers = new ArrayList<>();
         for (Node argument : arguments) {
             numbers.add(plain(lower(argument)));
         }
-        return new Signed(program.append(new Instruction.Call(function, numbers)), false);
+        return atom(node, new Instruction.Call(function, numbers));
+    }
+
+    /** Appends an instruction that is no arithmetic and notes the prime-field value of the node that it computes. */
+    private Signed atom(Node node, Instruction instruction) {
+        int number = program.append(instruction);
+        atoms.putIfAbsent(number, node);
+        return new Signed(number, false);
     }
 
     private Signed sum(Node.Sum sum) {
@@ -246,23 +262,27 @@ public final class Lowering {
 
     private Signed root(Node base, BigInteger numerator, BigInteger denominator) {
         int radicand = plain(lower(base));
-        Integer root = null;
-        BigInteger multiplicity = numerator;
+        boolean named = denominator.equals(BigInteger.TWO)
+                || denominator.equals(BigInteger.valueOf(3))
+                || denominator.equals(BigInteger.valueOf(4));
+        if (!named || numerator.bitLength() > 6) {
+            BigFraction exponent = new BigFraction(numerator, denominator);
+            int number = program.constant(exponent);
+            return atom(
+                    graph.power(base, exponent), new Instruction.Call(RealFunction.POW, List.of(radicand, number)));
+        }
+        Node rootNode = graph.power(base, new BigFraction(BigInteger.ONE, denominator));
+        Signed root;
         if (denominator.equals(BigInteger.TWO)) {
-            root = program.append(new Instruction.Call(RealFunction.SQRT, List.of(radicand)));
+            root = atom(rootNode, new Instruction.Call(RealFunction.SQRT, List.of(radicand)));
         } else if (denominator.equals(BigInteger.valueOf(3))) {
-            root = program.append(new Instruction.Call(RealFunction.CBRT, List.of(radicand)));
-        } else if (denominator.equals(BigInteger.valueOf(4))) {
-            int half = program.append(new Instruction.Call(RealFunction.SQRT, List.of(radicand)));
-            root = program.append(new Instruction.Call(RealFunction.SQRT, List.of(half)));
+            root = atom(rootNode, new Instruction.Call(RealFunction.CBRT, List.of(radicand)));
+        } else {
+            Signed half = atom(graph.sqrt(base), new Instruction.Call(RealFunction.SQRT, List.of(radicand)));
+            root = atom(rootNode, new Instruction.Call(RealFunction.SQRT, List.of(half.number())));
         }
-        if (root == null || numerator.bitLength() > 6) {
-            int exponent = program.constant(new BigFraction(numerator, denominator));
-            return new Signed(
-                    program.append(new Instruction.Call(RealFunction.POW, List.of(radicand, exponent))), false);
-        }
-        BigInteger[] parts = multiplicity.divideAndRemainder(denominator);
-        Signed fraction = whole(new Signed(root, false), parts[1]);
+        BigInteger[] parts = numerator.divideAndRemainder(denominator);
+        Signed fraction = whole(root, parts[1]);
         if (parts[0].signum() == 0) {
             return fraction;
         }

@@ -6,10 +6,10 @@ package io.github.gammawright.graph;
  * <p>Two fields are used together: {@link #VALUES} with the safe prime p = 2q + 1 for the values of functions, and
  * {@link #EXPONENTS} with q for exponents of squares modulo p (Gonnet 1984).
  */
-final class PrimeField {
+public final class PrimeField {
 
     /** p = 2^61 − 2373, a safe prime with p ≡ 3 (mod 4). */
-    static final PrimeField VALUES = new PrimeField(61, 2373);
+    public static final PrimeField VALUES = new PrimeField(61, 2373);
 
     /** q = (p − 1)/2 = 2^60 − 1187, the order of the group of squares modulo p. */
     static final PrimeField EXPONENTS = new PrimeField(60, 1187);
@@ -26,25 +26,30 @@ final class PrimeField {
         this.prime = (1L << bits) - offset;
     }
 
-    long prime() {
+    /** The prime itself. */
+    public long prime() {
         return prime;
     }
 
-    long add(long a, long b) {
+    /** a + b. */
+    public long add(long a, long b) {
         long sum = a + b;
         return sum >= prime ? sum - prime : sum;
     }
 
-    long subtract(long a, long b) {
+    /** a − b. */
+    public long subtract(long a, long b) {
         long difference = a - b;
         return difference < 0 ? difference + prime : difference;
     }
 
-    long negate(long a) {
+    /** −a. */
+    public long negate(long a) {
         return a == 0 ? 0 : prime - a;
     }
 
-    long multiply(long a, long b) {
+    /** a · b. */
+    public long multiply(long a, long b) {
         long high = Math.multiplyHigh(a, b);
         long low = a * b;
         long top = (high << (64 - bits)) | (low >>> bits);
@@ -61,7 +66,7 @@ final class PrimeField {
     }
 
     /** a^exponent for a non-negative exponent. */
-    long power(long a, long exponent) {
+    public long power(long a, long exponent) {
         long result = 1;
         long square = a;
         for (long e = exponent; e != 0; e >>>= 1) {
@@ -74,7 +79,7 @@ final class PrimeField {
     }
 
     /** The reciprocal of a, which must not be 0. */
-    long inverse(long a) {
+    public long inverse(long a) {
         if (a == 0) {
             throw new ArithmeticException("reciprocal of zero");
         }
@@ -100,7 +105,7 @@ final class PrimeField {
     }
 
     /** The element that a fraction stands for; its denominator must not be a multiple of the prime. */
-    long element(org.hipparchus.fraction.BigFraction fraction) {
+    public long element(org.hipparchus.fraction.BigFraction fraction) {
         java.math.BigInteger modulus = java.math.BigInteger.valueOf(prime);
         long numerator = fraction.getNumerator().mod(modulus).longValueExact();
         long denominator = fraction.getDenominator().mod(modulus).longValueExact();

@@ -8,13 +8,14 @@ import java.util.Map;
 import org.hipparchus.fraction.BigFraction;
 
 /** Appends instructions one by one; an instruction that is there already is not repeated. */
-final class ProgramBuilder {
+public final class ProgramBuilder {
 
     private final List<Instruction> instructions = new ArrayList<>();
     private final Map<Instruction, Integer> known = new HashMap<>();
     private final Map<Integer, String> names = new LinkedHashMap<>();
 
-    int append(Instruction instruction) {
+    /** The number of an instruction, which is appended if it is not there yet. */
+    public int append(Instruction instruction) {
         Integer number = known.get(instruction);
         if (number == null) {
             number = instructions.size();
@@ -24,27 +25,33 @@ final class ProgramBuilder {
         return number;
     }
 
-    int constant(BigFraction value) {
+    /** A rational number. */
+    public int constant(BigFraction value) {
         return append(new Instruction.Constant(value));
     }
 
-    int add(int a, int b) {
+    /** a + b. */
+    public int add(int a, int b) {
         return arithmetic(Instruction.Operator.ADD, Math.min(a, b), Math.max(a, b));
     }
 
-    int subtract(int a, int b) {
+    /** a − b. */
+    public int subtract(int a, int b) {
         return arithmetic(Instruction.Operator.SUBTRACT, a, b);
     }
 
-    int multiply(int a, int b) {
+    /** a · b. */
+    public int multiply(int a, int b) {
         return arithmetic(Instruction.Operator.MULTIPLY, Math.min(a, b), Math.max(a, b));
     }
 
-    int divide(int a, int b) {
+    /** a / b. */
+    public int divide(int a, int b) {
         return arithmetic(Instruction.Operator.DIVIDE, a, b);
     }
 
-    int negate(int a) {
+    /** The number of the negative of a value. */
+    public int negate(int a) {
         return instructions.get(a) instanceof Instruction.Negation negation
                 ? negation.operand()
                 : append(new Instruction.Negation(a));
@@ -54,11 +61,13 @@ final class ProgramBuilder {
         return append(new Instruction.Arithmetic(operator, a, b));
     }
 
-    void name(int number, String name) {
+    /** Gives a value a name, unless it has one. */
+    public void name(int number, String name) {
         names.putIfAbsent(number, name);
     }
 
-    StraightLineProgram build(List<Integer> outputs) {
+    /** The program with the given outputs. */
+    public StraightLineProgram build(List<Integer> outputs) {
         return new StraightLineProgram(instructions, names, outputs);
     }
 }

@@ -1,0 +1,62 @@
+package io.github.gammawright.optimiser;
+
+import java.util.Arrays;
+
+/** A hash table from non-negative residues to small numbers, open-addressed for speed. */
+final class ValueTable {
+
+    private long[] keys = new long[256];
+    private int[] values = new int[256];
+    private int count;
+
+    ValueTable() {
+        Arrays.fill(values, -1);
+    }
+
+    int find(long key) {
+        int mask = keys.length - 1;
+        for (int i = slot(key, mask); values[i] >= 0; i = (i + 1) & mask) {
+            if (keys[i] == key) {
+                return values[i];
+            }
+        }
+        return -1;
+    }
+
+    /** Enters a value; of two with one key the first stays. */
+    void put(long key, int value) {
+        if (2 * (count + 1) > keys.length) {
+            grow();
+        }
+        int mask = keys.length - 1;
+        int i = slot(key, mask);
+        while (values[i] >= 0) {
+            if (keys[i] == key) {
+                return;
+            }
+            i = (i + 1) & mask;
+        }
+        keys[i] = key;
+        values[i] = value;
+        count++;
+    }
+
+    private void grow() {
+        long[] oldKeys = keys;
+        int[] oldValues = values;
+        keys = new long[2 * oldKeys.length];
+        values = new int[keys.length];
+        Arrays.fill(values, -1);
+        count = 0;
+        for (int i = 0; i < oldKeys.length; i++) {
+            if (oldValues[i] >= 0) {
+                put(oldKeys[i], oldValues[i]);
+            }
+        }
+    }
+
+    static int slot(long key, int mask) {
+        long h = key * 0x9E3779B97F4A7C15L;
+        return (int) (h >>> 32) & mask;
+    }
+}

@@ -19,7 +19,7 @@ final class ClassNames {
         if (earlier == null) {
             return;
         }
-        String by = earlier.definition() == definition
+        String by = earlier.definition().equals(definition)
                 ? "this definition"
                 : earlier.definition().source().name();
         if (earlier.name().equals(name)) {

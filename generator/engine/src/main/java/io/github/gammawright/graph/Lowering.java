@@ -268,8 +268,7 @@ public final class Lowering {
         if (!named || numerator.bitLength() > 6) {
             BigFraction exponent = new BigFraction(numerator, denominator);
             int number = program.constant(exponent);
-            return atom(
-                    graph.power(base, exponent), new Instruction.Call(RealFunction.POW, List.of(radicand, number)));
+            return atom(graph.power(base, exponent), new Instruction.Call(RealFunction.POW, List.of(radicand, number)));
         }
         Node rootNode = graph.power(base, new BigFraction(BigInteger.ONE, denominator));
         Signed root;

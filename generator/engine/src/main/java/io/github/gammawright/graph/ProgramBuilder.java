@@ -42,7 +42,10 @@ public final class ProgramBuilder {
 
     /** a · b. */
     public int multiply(int a, int b) {
-        return arithmetic(Instruction.Operator.MULTIPLY, Math.min(a, b), Math.max(a, b));
+        // a number comes first, as one writes it
+        boolean swap = instructions.get(b) instanceof Instruction.Constant
+                || (!(instructions.get(a) instanceof Instruction.Constant) && b < a);
+        return arithmetic(Instruction.Operator.MULTIPLY, swap ? b : a, swap ? a : b);
     }
 
     /** a / b. */

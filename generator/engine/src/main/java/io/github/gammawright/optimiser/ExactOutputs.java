@@ -41,7 +41,8 @@ final class ExactOutputs {
             for (int o = 0; o < outputs; o++) {
                 int instruction = program.outputs().get(o);
                 high[o][k] = exact[instruction].toDouble();
-                low[o][k] = exact[instruction].subtract(field.newDfp(high[o][k])).toDouble();
+                low[o][k] =
+                        exact[instruction].subtract(field.newDfp(high[o][k])).toDouble();
                 double sum = Math.abs(high[o][k]);
                 for (int m = 0; m < symbols.size(); m++) {
                     double partial = gradient[instruction].getPartialDerivative(m);
@@ -113,15 +114,13 @@ final class ExactOutputs {
         };
     }
 
-    private static Gradient[] gradients(
-            StraightLineProgram program, List<Symbol> symbols, SamplePoints points, int k) {
+    private static Gradient[] gradients(StraightLineProgram program, List<Symbol> symbols, SamplePoints points, int k) {
         int m = symbols.size();
         Gradient[] values = new Gradient[program.size()];
         for (int i = 0; i < values.length; i++) {
             Instruction instruction = program.instruction(i);
             if (instruction instanceof Instruction.Load load) {
-                values[i] = Gradient.variable(
-                        m, symbols.indexOf(load.symbol()), points.value(load.symbol(), k));
+                values[i] = Gradient.variable(m, symbols.indexOf(load.symbol()), points.value(load.symbol(), k));
             } else if (instruction instanceof Instruction.Constant constant) {
                 values[i] = Gradient.constant(m, constant.value().doubleValue());
             } else if (instruction instanceof Instruction.Pi) {

@@ -5,9 +5,7 @@ import io.github.gammawright.graph.LoweredProgram;
 import io.github.gammawright.graph.PrimeField;
 import io.github.gammawright.graph.RealFunction;
 import io.github.gammawright.graph.StraightLineProgram;
-import java.util.ArrayList;
 import java.util.Arrays;
-import java.util.List;
 
 /**
  * Values and how each of them is computed from others at present, made for being rewired many thousand times a second.
@@ -60,6 +58,9 @@ final class Network {
     /** The values that the call of an atom takes, empty for symbols; null for other values. */
     int[][] arguments = new int[64][];
 
+    /** Whether a value may be divided by: it vanishes only where the source program divides by zero too. */
+    boolean[] divisor = new boolean[64];
+
     final int[] outputs;
     final boolean[] outputMinus;
 
@@ -82,6 +83,7 @@ final class Network {
                 load(i, lowered);
             }
         }
+        Divisors.mark(this);
         outputs = new int[program.outputs().size()];
         outputMinus = new boolean[outputs.length];
         for (int i = 0; i < outputs.length; i++) {
@@ -237,6 +239,7 @@ final class Network {
         inverse = Arrays.copyOf(inverse, capacity);
         freeOperation = Arrays.copyOf(freeOperation, capacity);
         origin = Arrays.copyOf(origin, capacity);
+        divisor = Arrays.copyOf(divisor, capacity);
         arguments = Arrays.copyOf(arguments, capacity);
         for (int k = 0; k < POINTS; k++) {
             residues[k] = Arrays.copyOf(residues[k], capacity);

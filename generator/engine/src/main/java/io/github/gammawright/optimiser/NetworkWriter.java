@@ -211,8 +211,8 @@ final class NetworkWriter {
         }
         int result;
         if (instruction instanceof Instruction.Arithmetic arithmetic) {
-            result = builder.append(
-                    new Instruction.Arithmetic(arithmetic.operator(), operands.get(0), operands.get(1)));
+            result =
+                    builder.append(new Instruction.Arithmetic(arithmetic.operator(), operands.get(0), operands.get(1)));
         } else if (instruction instanceof Instruction.Negation) {
             result = builder.negate(operands.get(0));
         } else if (instruction instanceof Instruction.Call call) {

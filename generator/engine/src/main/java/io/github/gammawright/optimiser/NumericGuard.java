@@ -5,6 +5,8 @@ import io.github.gammawright.graph.ProgramInterpreter;
 import io.github.gammawright.graph.RealFunctions;
 import io.github.gammawright.graph.SamplePoints;
 import io.github.gammawright.graph.StraightLineProgram;
+import java.util.Arrays;
+import java.util.function.IntPredicate;
 
 /**
  * Measures how far the outputs of a network are from the truth at sample points of the domain, in multiples of the
@@ -12,23 +14,29 @@ import io.github.gammawright.graph.StraightLineProgram;
  */
 final class NumericGuard {
 
+    /** How far above its least error a network beyond the tolerance may go, so that rounding does not stop it. */
+    private static final double SLACK = 1.2;
+
     private final StraightLineProgram program;
     private final SamplePoints points;
     private final ExactOutputs exact;
     private final double[][] sourceValues;
     private final double tolerance;
     private double reached;
+    private double least;
+    private double[][] known = new double[0][];
 
     /**
      * A guard over the outputs of a program.
      *
+     * @param exact what its outputs are, which every program for these outputs shares
      * @param tolerance the multiple of the limit that every output may reach; a program that is worse to begin with
      *     must not become worse still
      */
-    NumericGuard(StraightLineProgram program, SamplePoints points, double tolerance) {
+    NumericGuard(StraightLineProgram program, ExactOutputs exact, SamplePoints points, double tolerance) {
         this.program = program;
         this.points = points;
-        this.exact = new ExactOutputs(program, points);
+        this.exact = exact;
         this.sourceValues = new double[points.count()][];
         this.tolerance = tolerance;
         this.reached = 0;
@@ -40,15 +48,30 @@ final class NumericGuard {
                         reached, error(o, k, sourceValues[k][program.outputs().get(o)]));
             }
         }
+        this.least = reached;
     }
 
-    /** Whether the outputs stay within the tolerance, or at least come no further from it than they were. */
-    boolean accepts(Network network) {
-        double worst = worst(network);
-        if (worst > tolerance && worst > reached) {
+    /**
+     * Whether the outputs stay within the tolerance, or at least come no further from it than they were.
+     *
+     * @param touched whether a value is computed otherwise than at the last call that accepted
+     */
+    boolean accepts(Network network, IntPredicate touched) {
+        if (known.length < network.size) {
+            known = Arrays.copyOf(known, 2 * network.size);
+        }
+        double[][] fresh = new double[network.size][];
+        double worst = worst(network, touched, fresh);
+        if (worst > tolerance && worst > SLACK * least) {
             return false;
         }
         reached = worst;
+        least = Math.min(least, worst);
+        for (int v = 0; v < fresh.length; v++) {
+            if (fresh[v] != null) {
+                known[v] = fresh[v];
+            }
+        }
         return true;
     }
 
@@ -57,12 +80,10 @@ final class NumericGuard {
         return reached;
     }
 
-    /** The error of the worst output in multiples of the limit. */
-    double worst(Network network) {
+    private double worst(Network network, IntPredicate touched, double[][] fresh) {
         double worst = 0;
-        double[][] values = values(network);
         for (int o = 0; o < network.outputs.length; o++) {
-            double[] value = values[network.outputs[o]];
+            double[] value = value(network, network.outputs[o], touched, fresh);
             for (int k = 0; k < points.count(); k++) {
                 worst = Math.max(worst, error(o, k, network.outputMinus[o] ? -value[k] : value[k]));
             }
@@ -81,36 +102,35 @@ final class NumericGuard {
         return Double.isNaN(difference) ? Double.POSITIVE_INFINITY : difference / exact.limit[output][point];
     }
 
-    private double[][] values(Network network) {
-        double[][] values = new double[network.size][];
-        for (int output : network.outputs) {
-            value(network, output, values);
+    private double[] value(Network network, int v, IntPredicate touched, double[][] fresh) {
+        if (fresh[v] != null) {
+            return fresh[v];
         }
-        return values;
-    }
-
-    private double[] value(Network network, int v, double[][] values) {
-        if (values[v] != null) {
-            return values[v];
+        if (known[v] != null && !touched.test(v)) {
+            return known[v];
         }
         double[] value = new double[points.count()];
         byte operation = network.operation[v];
         if (operation == Network.ATOM) {
-            atom(network, v, value, values);
+            atom(network, v, value, touched, fresh);
         } else if (network.origin[v] >= 0 && operation == Network.FREE) {
-            boolean minus = network.leftMinus[v];
-            for (int k = 0; k < value.length; k++) {
-                double x = sourceValues[k][network.origin[v]];
-                value[k] = minus ? -x : x;
-            }
+            given(network, v, value);
         } else {
             byte kind = operation == Network.FREE ? network.freeOperation[v] : operation;
-            double[] a = value(network, network.left[v], values);
-            double[] b = value(network, network.right[v], values);
+            double[] a = value(network, network.left[v], touched, fresh);
+            double[] b = value(network, network.right[v], touched, fresh);
             combine(kind, network.leftMinus[v], network.rightMinus[v], a, b, value);
         }
-        values[v] = value;
+        fresh[v] = value;
         return value;
+    }
+
+    /** The values of an instruction of the source program, which nothing can change. */
+    private void given(Network network, int v, double[] value) {
+        for (int k = 0; k < value.length; k++) {
+            double x = sourceValues[k][network.origin[v]];
+            value[k] = network.leftMinus[v] ? -x : x;
+        }
     }
 
     private static void combine(byte kind, boolean minusA, boolean minusB, double[] a, double[] b, double[] value) {
@@ -123,19 +143,15 @@ final class NumericGuard {
         }
     }
 
-    private void atom(Network network, int v, double[] value, double[][] values) {
-        boolean minus = network.leftMinus[v];
+    private void atom(Network network, int v, double[] value, IntPredicate touched, double[][] fresh) {
         Instruction instruction = program.instruction(network.origin[v]);
         if (!(instruction instanceof Instruction.Call call)) {
-            for (int k = 0; k < value.length; k++) {
-                double x = sourceValues[k][network.origin[v]];
-                value[k] = minus ? -x : x;
-            }
+            given(network, v, value);
             return;
         }
         double[][] arguments = new double[network.arguments[v].length][];
         for (int i = 0; i < arguments.length; i++) {
-            arguments[i] = value(network, network.arguments[v][i], values);
+            arguments[i] = value(network, network.arguments[v][i], touched, fresh);
         }
         double[] x = new double[arguments.length];
         for (int k = 0; k < value.length; k++) {
@@ -146,7 +162,7 @@ final class NumericGuard {
                 same &= x[i] == sourceValues[k][operand];
             }
             double y = same ? sourceValues[k][network.origin[v]] : RealFunctions.value(call.function(), x);
-            value[k] = minus ? -y : y;
+            value[k] = network.leftMinus[v] ? -y : y;
         }
     }
 }

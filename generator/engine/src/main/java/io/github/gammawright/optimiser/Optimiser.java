@@ -2,41 +2,100 @@ package io.github.gammawright.optimiser;
 
 import io.github.gammawright.graph.LoweredProgram;
 import io.github.gammawright.graph.SamplePoints;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.SplittableRandom;
 
-/** Rewires a program by {@link Resubstitution} in several rounds and keeps the cheapest that was seen. */
+/**
+ * Rewires programs by {@link Resubstitution}: all starts a little, then the most promising ones further. The budget
+ * counts looks at values, so that the outcome is the same on every machine.
+ */
 public final class Optimiser {
 
-    private static final int ROUND = 3000;
+    private static final int STEPS_A_ROUND = 3000;
     private static final int FREE_VALUES = 60;
     private static final int MOST_MEMBERS = 500;
+    private static final int LARGEST = 25_000;
+
+    /** What a program may reach at the guard's points, so that it stays below 4 limits everywhere. */
     private static final double TOLERANCE = 2.5;
 
-    private Optimiser() {}
+    private final SamplePoints points;
+    private final long budget;
+    private long spent;
+    private ExactOutputs exact;
 
     /**
-     * A program that computes the same outputs at no higher cost.
+     * An optimiser.
      *
-     * @param steps how many values may be looked at
+     * @param points where errors are measured
+     * @param budget how many values may be looked at as parts of a replacement
      */
-    public static LoweredProgram optimise(LoweredProgram start, SamplePoints points, long steps, long seed) {
-        LoweredProgram best = start;
-        LoweredProgram current = start;
-        int bestCost = Integer.MAX_VALUE;
-        NumericGuard guard = null;
-        for (long done = 0, round = 0; done < steps; done += ROUND, round++) {
-            Network network = new Network(current);
-            guard = new NumericGuard(current.program(), points, TOLERANCE);
-            ParameterClosure.extend(network, FREE_VALUES);
-            Resubstitution search = new Resubstitution(network, guard, seed + round, MOST_MEMBERS);
-            search.run((int) Math.min(ROUND, steps - done));
-            current = NetworkWriter.write(network);
-            int cost = network.totalCost();
-            if (Boolean.getBoolean("trace")) System.out.println("  round "+round+" cost "+cost+" ops "+network.operations()+" size "+network.size+" worst "+guard.worst(network));
-            if (cost <= bestCost) {
-                best = current;
-                bestCost = cost;
-            }
+    public Optimiser(SamplePoints points, long budget) {
+        this.points = points;
+        this.budget = budget;
+    }
+
+    /** A state of the search. */
+    private record State(LoweredProgram program, int cost, double error, int start) {
+
+        /** Cost first, but a program that keeps its digits before any that does not. */
+        static final Comparator<State> ORDER = Comparator.comparingDouble((State s) -> Math.max(s.error, TOLERANCE))
+                .thenComparingInt(State::cost);
+    }
+
+    /** What came out. */
+    public record Outcome(LoweredProgram program, int start) {}
+
+    /**
+     * The best program found for some outputs.
+     *
+     * @param starts programs that all compute these outputs
+     */
+    public Outcome optimise(List<LoweredProgram> starts) {
+        exact = new ExactOutputs(starts.get(0).program(), points);
+        List<State> states = new ArrayList<>();
+        for (int i = 0; i < starts.size(); i++) {
+            Network network = new Network(starts.get(i));
+            NumericGuard guard = new NumericGuard(starts.get(i).program(), exact, points, TOLERANCE);
+            states.add(new State(starts.get(i), network.totalCost(), guard.reached(), i));
         }
-        return best;
+        int width = Math.max(2, states.size());
+        List<State> seen = new ArrayList<>(states);
+        List<State> current = states;
+        for (int generation = 0; spent < budget; generation++) {
+            List<State> next = new ArrayList<>();
+            for (int i = 0; i < width && spent < budget; i++) {
+                State parent = current.get(i % current.size());
+                next.add(round(parent, 7919L * generation + i));
+            }
+            if (next.isEmpty()) {
+                break;
+            }
+            seen.addAll(next);
+            seen.sort(State.ORDER);
+            seen = new ArrayList<>(seen.subList(0, Math.min(seen.size(), 4)));
+            width = Math.max(2, (width + 1) / 2);
+            current = seen;
+        }
+        State best = seen.stream().min(State.ORDER).orElseThrow();
+        return new Outcome(best.program(), best.start());
+    }
+
+    private State round(State parent, long seed) {
+        Network network = new Network(parent.program());
+        if (network.size > LARGEST) {
+            spent = budget;
+            return parent;
+        }
+        NumericGuard guard = new NumericGuard(parent.program().program(), exact, points, TOLERANCE);
+        ParameterClosure.extend(network, FREE_VALUES);
+        SplittableRandom random = new SplittableRandom(seed);
+        int[] window = Windows.choose(network, random, MOST_MEMBERS);
+        Resubstitution search = new Resubstitution(network, guard, random.nextLong(), window, MOST_MEMBERS);
+        search.run(STEPS_A_ROUND);
+        spent += (long) STEPS_A_ROUND * window.length;
+        return new State(NetworkWriter.write(network), network.totalCost(), guard.reached(), parent.start());
     }
 }

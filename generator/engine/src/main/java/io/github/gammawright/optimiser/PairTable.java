@@ -68,8 +68,12 @@ final class PairTable {
         if (u != v) {
             put(P.add(a, b), u, v, SUM);
             put(P.subtract(a, b), u, v, DIFFERENCE);
-            put(P.multiply(a, network.inverse[v]), u, v, QUOTIENT);
-            put(P.multiply(b, network.inverse[u]), u, v, INVERSE_QUOTIENT);
+            if (network.divisor[v]) {
+                put(P.multiply(a, network.inverse[v]), u, v, QUOTIENT);
+            }
+            if (network.divisor[u]) {
+                put(P.multiply(b, network.inverse[u]), u, v, INVERSE_QUOTIENT);
+            }
         }
         put(P.multiply(a, b), u, v, PRODUCT);
     }

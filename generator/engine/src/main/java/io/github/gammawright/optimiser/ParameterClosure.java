@@ -36,7 +36,8 @@ final class ParameterClosure {
     private static int combine(Network network, int kind, int u, int v) {
         long a = network.residues[0][u];
         long b = network.residues[0][v];
-        long value = kind == PairTable.PRODUCT ? P.multiply(a, b) : kind == PairTable.SUM ? P.add(a, b) : P.subtract(a, b);
+        long value =
+                kind == PairTable.PRODUCT ? P.multiply(a, b) : kind == PairTable.SUM ? P.add(a, b) : P.subtract(a, b);
         if (value == 0 || network.find(Network.unsigned(value)) >= 0) {
             return 0;
         }

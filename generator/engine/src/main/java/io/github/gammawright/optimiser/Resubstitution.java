@@ -14,7 +14,7 @@ final class Resubstitution {
 
     private static final PrimeField P = PrimeField.VALUES;
     private static final int NONE = -1;
-    private static final double MOST_NOISE = 8;
+    private static final double MOST_NOISE = 5;
     /** Where the temperature starts, in units of the modelled cost, and to what share of that it falls. */
     private static final double HOT = 1.5;
 
@@ -39,7 +39,13 @@ final class Resubstitution {
     private int innerFirst;
     private int innerSecond;
 
-    Resubstitution(Network network, NumericGuard guard, long seed, int mostMembers) {
+    /**
+     * A search.
+     *
+     * @param window the values that are replaced and that replacements are made of
+     * @param mostMembers up to how many values the window may grow
+     */
+    Resubstitution(Network network, NumericGuard guard, long seed, int[] window, int mostMembers) {
         this.network = network;
         this.guard = guard;
         this.random = new SplittableRandom(seed);
@@ -47,10 +53,8 @@ final class Resubstitution {
         this.mostMembers = mostMembers;
         this.stamp = new int[network.size];
         this.depends = new boolean[network.size];
-        for (int v = 0; v < network.size; v++) {
-            if (pairs.members() < mostMembers) {
-                pairs.add(v);
-            }
+        for (int v : window) {
+            pairs.add(v);
         }
     }
 
@@ -76,9 +80,10 @@ final class Resubstitution {
     }
 
     private int[] shuffledTargets() {
-        int[] targets = new int[network.size];
+        int[] targets = new int[pairs.members()];
         int count = 0;
-        for (int v = 0; v < network.size; v++) {
+        for (int i = 0; i < targets.length; i++) {
+            int v = pairs.member(i);
             if (network.uses[v] > 0 && network.operation[v] >= Network.ADD) {
                 targets[count++] = v;
             }
@@ -109,7 +114,9 @@ final class Resubstitution {
             lookUp(t, freed, PairTable.SUM, w, P.add(residue, other));
             if (other != 0) {
                 lookUp(t, freed, PairTable.PRODUCT, w, P.multiply(residue, inverse));
-                lookUp(t, freed, PairTable.QUOTIENT, w, P.multiply(residue, other));
+                if (network.divisor[w]) {
+                    lookUp(t, freed, PairTable.QUOTIENT, w, P.multiply(residue, other));
+                }
                 lookUp(t, freed, PairTable.INVERSE_QUOTIENT, w, P.multiply(other, network.inverse[t]));
             }
         }
@@ -134,15 +141,21 @@ final class Resubstitution {
         int outerCost = costOf(kind);
         int known = network.find(key);
         if (known >= 0) {
-            if (known != t && !dependsOnTarget(known)) {
+            boolean possible = kind != PairTable.INVERSE_QUOTIENT || network.divisor[known];
+            if (possible && known != t && !dependsOnTarget(known)) {
                 consider(freed, outerCost, kind, w, NONE, known, NONE);
             }
+            return;
+        }
+        if (outerCost + Network.COST_ADD - freed > best + MOST_NOISE * temperature) {
             return;
         }
         for (int place = pairs.first(key); place >= 0; place = pairs.next(key, place)) {
             int u = pairs.firstOf(place);
             int v = pairs.secondOf(place);
-            if (!dependsOnTarget(u) && !dependsOnTarget(v)) {
+            boolean possible =
+                    kind != PairTable.INVERSE_QUOTIENT || Divisors.isDivisor(network, pairs.kind(place), u, v);
+            if (possible && !dependsOnTarget(u) && !dependsOnTarget(v)) {
                 consider(freed, outerCost + costOf(pairs.kind(place)), kind, w, pairs.kind(place), u, v);
             }
         }
@@ -195,14 +208,13 @@ final class Resubstitution {
             }
             ensureCapacity();
         }
-        boolean unchanged = !fresh
-                && sameOperands(oldLeft, oldRight, outerOther, x)
-                && Wiring.operation(outerKind) == oldOperation;
+        boolean unchanged =
+                !fresh && sameOperands(oldLeft, oldRight, outerOther, x) && Wiring.operation(outerKind) == oldOperation;
         if (unchanged || !Wiring.rewire(network, t, outerKind, outerOther, x)) {
             return false;
         }
         network.acquireOperands(t);
-        if (!guard.accepts(network)) {
+        if (!guard.accepts(network, this::dependsOnTarget)) {
             network.releaseOperands(t);
             network.operation[t] = oldOperation;
             network.left[t] = oldLeft;

@@ -49,7 +49,9 @@ final class Wiring {
         int y = kind == PairTable.INVERSE_QUOTIENT ? u : v;
         byte operation = operation(kind);
         boolean second = operation == Network.ADD && (kind == PairTable.DIFFERENCE ^ minus);
-        return network.append(operation, x, y, minus, second, value, -1);
+        int fresh = network.append(operation, x, y, minus, second, value, -1);
+        network.divisor[fresh] = Divisors.isDivisor(network, kind, u, v);
+        return fresh;
     }
 
     /** Lets a target be computed from w and x; false, and nothing done, if that is not true at all points. */
@@ -72,8 +74,7 @@ final class Wiring {
         return false;
     }
 
-    private static boolean holds(
-            Network network, int t, byte operation, int a, int b, boolean minusA, boolean minusB) {
+    private static boolean holds(Network network, int t, byte operation, int a, int b, boolean minusA, boolean minusB) {
         for (int k = 0; k < Network.POINTS; k++) {
             long x = network.residues[k][a];
             long y = network.residues[k][b];

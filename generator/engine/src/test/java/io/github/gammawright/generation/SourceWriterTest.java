@@ -144,7 +144,7 @@ class SourceWriterTest {
 
     @Test
     void tidiesUpWhenTheProgramIsInterrupted() throws IOException {
-        List<Thread> actions = new ArrayList<>();
+        List<Runnable> actions = new ArrayList<>();
         ExitActions exit = new ExitActions() {
             @Override
             public void add(Thread action) {
@@ -159,7 +159,7 @@ class SourceWriterTest {
         try (TemporaryFiles files = new TemporaryFiles(exit)) {
             files.stage(temporary.resolve("Star.java"), new byte[] {1});
             assertThat(everything(temporary)).hasSize(1);
-            actions.forEach(Thread::run);
+            actions.forEach(Runnable::run);
             assertThat(everything(temporary)).isEmpty();
         }
         assertThat(actions).isEmpty();

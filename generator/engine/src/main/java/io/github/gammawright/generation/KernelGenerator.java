@@ -1,0 +1,54 @@
+package io.github.gammawright.generation;
+
+import io.github.gammawright.definition.MetricDefinition;
+import io.github.gammawright.emission.KernelEmitter;
+import io.github.gammawright.geometry.DomainPoints;
+import io.github.gammawright.geometry.DomainProgram;
+import io.github.gammawright.geometry.MetricGraphBuilder;
+import io.github.gammawright.geometry.Route;
+import io.github.gammawright.graph.LoweredProgram;
+import io.github.gammawright.optimiser.Optimiser;
+import java.util.ArrayList;
+import java.util.List;
+
+/** The way from a definition to a kernel class. */
+public final class KernelGenerator {
+
+    private static final int GUARD_POINTS = 48;
+
+    /**
+     * Makes a class.
+     *
+     * @throws io.github.gammawright.diagnostic.DefinitionException for mistakes of the definition that show only when
+     *     its metric is built, such as a determinant that vanishes identically
+     */
+    public GeneratedClass generate(MetricDefinition definition, KernelSpecification specification) {
+        List<Candidate> candidates = new ArrayList<>();
+        for (Route route : Route.candidates(MetricGraphBuilder.build(definition), specification.quantities())) {
+            candidates.add(Candidate.of(definition, specification.quantities(), route));
+        }
+        Optimiser optimiser = new Optimiser(
+                DomainPoints.draw(definition, GUARD_POINTS),
+                budget(specification.options().effort()));
+        Optimiser.Outcome outcome =
+                optimiser.optimise(candidates.stream().map(Candidate::program).toList());
+        Candidate origin = candidates.get(outcome.start());
+        LoweredProgram program = outcome.program();
+        List<CostReport.Stage> stages = List.of(
+                new CostReport.Stage(
+                        "graph (" + origin.route().description() + ")",
+                        origin.program().program().count()),
+                new CostReport.Stage("resubstitution", program.program().count()));
+        String source = KernelEmitter.emit(KernelModels.of(
+                definition, specification, origin.zero(), program.program(), DomainProgram.of(definition)));
+        return new GeneratedClass(specification, source, new CostReport(stages));
+    }
+
+    private static long budget(GenerationOptions.Effort effort) {
+        return switch (effort) {
+            case QUICK -> 2_000_000;
+            case NORMAL -> 6_000_000;
+            case THOROUGH -> 100_000_000;
+        };
+    }
+}

@@ -2,6 +2,7 @@ package io.github.gammawright.definition;
 
 import io.github.gammawright.diagnostic.DiagnosticCode;
 import io.github.gammawright.diagnostic.Diagnostics;
+import io.github.gammawright.diagnostic.SourceText;
 import java.math.BigInteger;
 import java.util.HashMap;
 import java.util.Map;
@@ -32,6 +33,23 @@ final class ConstantCheck {
         sound = true;
         Value value = value(expression);
         return sound ? Optional.of(value) : Optional.empty();
+    }
+
+    /** Whether the expression is a constant that is exactly zero. */
+    boolean isZero(Expression expression) {
+        return check(expression)
+                .filter(Value::isConstant)
+                .filter(value -> value.constant().isZero())
+                .isPresent();
+    }
+
+    /** The exact value of an expression that is a rational constant of moderate size. */
+    static Optional<BigFraction> rational(Expression expression) {
+        Diagnostics ignored = new Diagnostics(new SourceText("", ""));
+        return new ConstantCheck(Limits.DEFAULT, ignored)
+                .check(expression)
+                .filter(Value::isConstant)
+                .map(Value::constant);
     }
 
     /** From now on the name stands for the expression, as an abbreviation does. */

@@ -42,6 +42,15 @@ public final class Expressions {
         }
     }
 
+    /** How many functions are called. */
+    static int calls(Expression expression) {
+        int calls = expression instanceof Expression.Call ? 1 : 0;
+        for (Expression operand : operands(expression)) {
+            calls += calls(operand);
+        }
+        return calls;
+    }
+
     /** How high the tree is, when a name counts as what the given function says; 1 is that of a leaf. */
     static int height(Expression expression, java.util.function.ToIntFunction<String> heightOfName) {
         if (expression instanceof Expression.Name name) {

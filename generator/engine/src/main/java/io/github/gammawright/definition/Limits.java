@@ -24,5 +24,5 @@ public record Limits(
         int constantCalls) {
 
     /** What holds where nothing else is said. */
-    public static final Limits DEFAULT = new Limits(1 << 20, 250, 1_000, 200_000, 1_000, 8_192, 1_000, 2_000);
+    public static final Limits DEFAULT = new Limits(1 << 20, 250, 1_000, 200_000, 1_000, 8_192, 1_000, 500);
 }

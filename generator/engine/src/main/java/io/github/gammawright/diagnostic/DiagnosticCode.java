@@ -101,13 +101,14 @@ public enum DiagnosticCode {
     KEY_MISSING(Subject.TEXT, "'{0}' is missing {1}", "Add {2}."),
     TYPE_WRONG(Subject.TEXT, "'{0}' must be {1}, not {2}", ""),
     VALUE_UNKNOWN(Subject.TEXT, "unknown {0} '{1}'", "Known are {2}."),
+    VALUE_DUPLICATE(Subject.TEXT, "'{0}' is listed twice", "Remove one of the two."),
     LENGTH_WRONG(Subject.TEXT, "'{0}' needs {1}, not {2}", ""),
     DEFINITION_NAME_INVALID(
             Subject.TEXT,
             "'{0}' is not a name for a definition",
             "Use lower-case words of ASCII letters and digits joined by '-', a letter first, at most {1} characters:"
                     + " lantern-star."),
-    COORDINATES_WRONG(Subject.TEXT, "a metric has 1 to {0} coordinates, not {1}", ""),
+    COORDINATES_WRONG(Subject.TEXT, "a metric has {0} coordinates, not {1}", ""),
     NAME_INVALID(
             Subject.TEXT,
             "'{0}' is not a name",
@@ -136,12 +137,11 @@ public enum DiagnosticCode {
             Subject.TEXT,
             "this version does not read [pull-back]",
             "Write the metric in the new coordinates by line-element, metric, [three-plus-one] or coframe."),
-    TERM_DEGREE_WRONG(
-            Subject.TEXT,
-            "this term has degree {0} in the differentials, but {1} needs degree {2}",
-            "Each term of {1} holds {3}."),
+    TERM_DEGREE_WRONG(Subject.TEXT, "this term has degree {0} in the differentials, where degree {1} is needed", "{2}"),
     DIFFERENTIAL_MISPLACED(
-            Subject.TEXT, "the differential '{0}' stands {1}", "Differentials may be added and multiplied only."),
+            Subject.TEXT,
+            "the differential '{0}' stands in {1}",
+            "Differentials can be added, multiplied and raised to whole powers only."),
     DIFFERENTIAL_MISSING(
             Subject.TEXT,
             "no term has '{0}', so the metric is degenerate",
@@ -154,7 +154,11 @@ public enum DiagnosticCode {
             Subject.TEXT,
             "g_{0}{1} is not equal to g_{1}{0} on line {2}",
             "A metric is symmetric: correct one of the two."),
-    METRIC_DEGENERATE(Subject.TEXT, "the row of '{0}' is zero, so the metric is degenerate", ""),
+    METRIC_DEGENERATE(Subject.TEXT, "{0} is zero, so the metric is degenerate", ""),
+    CONSTANTS_TOO_COSTLY(
+            Subject.TEXT,
+            "the constant expressions of this definition call more than {0} functions",
+            "Write the numbers that they stand for."),
     SIGNATURE_INVALID(Subject.TEXT, "'{0}' is not a signature in {1}", "Write one + or - for each of them."),
     SIGNATURE_MISPLACED(
             Subject.TEXT,

@@ -1,5 +1,8 @@
 package io.github.gammawright.generation;
 
+import io.github.gammawright.algebra.AlgebraBudget;
+import io.github.gammawright.algebra.FormStyle;
+import io.github.gammawright.algebra.NormalForms;
 import io.github.gammawright.definition.MetricDefinition;
 import io.github.gammawright.geometry.Geometry;
 import io.github.gammawright.geometry.MetricGraph;
@@ -10,18 +13,25 @@ import io.github.gammawright.graph.LoweredProgram;
 import io.github.gammawright.graph.Lowering;
 import io.github.gammawright.graph.Node;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
+import java.util.Optional;
 
 /**
- * A kernel's components as computed along one route.
+ * A kernel's components as computed in one way.
  *
- * @param route the route
+ * @param description the way in words
  * @param zero for each quantity which of its components vanish identically, row-major
  * @param program computes all components, in this order
  */
-record Candidate(Route route, List<List<Boolean>> zero, LoweredProgram program) {
+record Candidate(String description, List<List<Boolean>> zero, LoweredProgram program) {
 
-    static Candidate of(MetricDefinition definition, List<Quantity> quantities, Route route) {
+    /** Up to how many different components are brought to closed form. */
+    private static final int MOST_CLOSED_FORMS = 48;
+
+    /** Along a route, and for the first route also in closed form, where the algebra finds one in its budget. */
+    static List<Candidate> of(MetricDefinition definition, List<Quantity> quantities, Route route, boolean closed) {
         MetricGraph metric = MetricGraphBuilder.build(definition);
         Geometry geometry = new Geometry(metric, route);
         List<Node> all = new ArrayList<>();
@@ -31,6 +41,33 @@ record Candidate(Route route, List<List<Boolean>> zero, LoweredProgram program) 
             all.addAll(components);
             zero.add(components.stream().map(Node::isZero).toList());
         }
-        return new Candidate(route, zero, Lowering.lowerWithValues(metric.graph(), all));
+        List<Candidate> candidates = new ArrayList<>();
+        candidates.add(new Candidate(route.description(), zero, Lowering.lowerWithValues(metric.graph(), all)));
+        if (closed) {
+            closedForms(metric, all).ifPresent(program -> candidates.add(new Candidate("closed forms", zero, program)));
+        }
+        return candidates;
+    }
+
+    private static Optional<LoweredProgram> closedForms(MetricGraph metric, List<Node> components) {
+        if (components.stream().distinct().count() > MOST_CLOSED_FORMS) {
+            return Optional.empty();
+        }
+        NormalForms forms = new NormalForms(metric.graph(), FormStyle.CHEAP, AlgebraBudget.quick());
+        Map<Node, Node> found = new HashMap<>();
+        List<Node> closed = new ArrayList<>();
+        for (Node component : components) {
+            Node known = found.get(component);
+            if (known == null) {
+                Optional<Node> form = forms.factored(component);
+                if (form.isEmpty()) {
+                    return Optional.empty();
+                }
+                known = form.get();
+                found.put(component, known);
+            }
+            closed.add(known);
+        }
+        return Optional.of(Lowering.lowerWithValues(forms.target(), closed));
     }
 }

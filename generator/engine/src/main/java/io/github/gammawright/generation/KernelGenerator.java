@@ -1,11 +1,18 @@
 package io.github.gammawright.generation;
 
+import io.github.gammawright.definition.Expressions;
 import io.github.gammawright.definition.MetricDefinition;
+import io.github.gammawright.definition.MetricForm;
+import io.github.gammawright.diagnostic.DiagnosticCode;
+import io.github.gammawright.diagnostic.Diagnostics;
+import io.github.gammawright.diagnostic.SourcePosition;
 import io.github.gammawright.emission.KernelEmitter;
+import io.github.gammawright.geometry.DegenerateMetricException;
 import io.github.gammawright.geometry.DomainPoints;
 import io.github.gammawright.geometry.DomainProgram;
 import io.github.gammawright.geometry.MetricGraphBuilder;
 import io.github.gammawright.geometry.Route;
+import io.github.gammawright.geometry.UndefinedValueException;
 import io.github.gammawright.graph.LoweredProgram;
 import io.github.gammawright.optimiser.Optimiser;
 import java.util.ArrayList;
@@ -14,7 +21,7 @@ import java.util.List;
 /** The way from a definition to a kernel class. */
 public final class KernelGenerator {
 
-    private static final int GUARD_POINTS = 48;
+    private static final int GUARD_POINTS = 32;
 
     /**
      * Makes a class.
@@ -23,12 +30,43 @@ public final class KernelGenerator {
      *     its metric is built, such as a determinant that vanishes identically
      */
     public GeneratedClass generate(MetricDefinition definition, KernelSpecification specification) {
+        try {
+            return make(definition, specification);
+        } catch (UndefinedValueException e) {
+            Diagnostics diagnostics = new Diagnostics(definition.source());
+            diagnostics.report(DiagnosticCode.DIVISION_BY_ZERO, e.position());
+            diagnostics.throwIfAny();
+            throw e;
+        } catch (DegenerateMetricException e) {
+            Diagnostics diagnostics = new Diagnostics(definition.source());
+            diagnostics.report(
+                    DiagnosticCode.METRIC_DEGENERATE, position(definition.form()), "the determinant of the metric");
+            diagnostics.throwIfAny();
+            throw e;
+        }
+    }
+
+    /** Where the metric is written. */
+    private static SourcePosition position(MetricForm form) {
+        if (form instanceof MetricForm.LineElement lineElement) {
+            return Expressions.start(lineElement.expression());
+        }
+        if (form instanceof MetricForm.Matrix matrix) {
+            return Expressions.start(matrix.rows().get(0).get(0));
+        }
+        if (form instanceof MetricForm.ThreePlusOne split) {
+            return Expressions.start(split.spatialLineElement());
+        }
+        return Expressions.start(((MetricForm.Coframe) form).oneForms().get(0));
+    }
+
+    private static GeneratedClass make(MetricDefinition definition, KernelSpecification specification) {
         List<Candidate> candidates = new ArrayList<>();
         for (Route route : Route.candidates(MetricGraphBuilder.build(definition), specification.quantities())) {
-            candidates.add(Candidate.of(definition, specification.quantities(), route));
+            candidates.addAll(Candidate.of(definition, specification.quantities(), route, candidates.isEmpty()));
         }
         Optimiser optimiser = new Optimiser(
-                DomainPoints.draw(definition, GUARD_POINTS),
+                DomainPoints.guard(definition, GUARD_POINTS),
                 budget(specification.options().effort()));
         Optimiser.Outcome outcome =
                 optimiser.optimise(candidates.stream().map(Candidate::program).toList());
@@ -36,7 +74,7 @@ public final class KernelGenerator {
         LoweredProgram program = outcome.program();
         List<CostReport.Stage> stages = List.of(
                 new CostReport.Stage(
-                        "graph (" + origin.route().description() + ")",
+                        "graph (" + origin.description() + ")",
                         origin.program().program().count()),
                 new CostReport.Stage("resubstitution", program.program().count()));
         String source = KernelEmitter.emit(KernelModels.of(
@@ -46,8 +84,8 @@ public final class KernelGenerator {
 
     private static long budget(GenerationOptions.Effort effort) {
         return switch (effort) {
-            case QUICK -> 2_000_000;
-            case NORMAL -> 6_000_000;
+            case QUICK -> 1_000_000;
+            case NORMAL -> 3_500_000;
             case THOROUGH -> 100_000_000;
         };
     }

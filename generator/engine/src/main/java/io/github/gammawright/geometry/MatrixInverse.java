@@ -51,6 +51,9 @@ final class MatrixInverse {
         Minors minors = new Minors(graph, matrix, block);
         int all = (1 << m) - 1;
         Node det = minors.minor(all, all);
+        if (det.isZero()) {
+            throw new DegenerateMetricException();
+        }
         graph.keep(det);
         determinant = graph.multiply(determinant, det);
         Node reciprocal = graph.reciprocal(det);
@@ -83,6 +86,9 @@ final class MatrixInverse {
             }
         }
         for (int k = 0; k < m; k++) {
+            if (rest[k][k].isZero()) {
+                throw new DegenerateMetricException();
+            }
             determinant = graph.multiply(determinant, rest[k][k]);
             reciprocals[k] = graph.reciprocal(rest[k][k]);
             for (int i = k + 1; i < m; i++) {

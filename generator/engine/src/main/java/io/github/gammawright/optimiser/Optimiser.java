@@ -38,11 +38,18 @@ public final class Optimiser {
     }
 
     /** A state of the search. */
-    private record State(LoweredProgram program, int cost, double error, int start) {
+    private record State(LoweredProgram program, int cost, double error, int start) {}
 
-        /** Cost first, but a program that keeps its digits before any that does not. */
-        static final Comparator<State> ORDER = Comparator.comparingDouble((State s) -> Math.max(s.error, TOLERANCE))
-                .thenComparingInt(State::cost);
+    /**
+     * Orders states: those that keep their digits come before those that do not, and among either the cheap ones first.
+     * Where none stays within the tolerance, four times the least error counts as kept.
+     */
+    private static Comparator<State> order(List<State> states) {
+        double least = states.stream().mapToDouble(State::error).min().orElse(0);
+        double kept = Math.max(TOLERANCE, 4 * least);
+        return Comparator.comparing((State s) -> s.error() > kept)
+                .thenComparingInt(State::cost)
+                .thenComparingDouble(State::error);
     }
 
     /** What came out. */
@@ -74,12 +81,12 @@ public final class Optimiser {
                 break;
             }
             seen.addAll(next);
-            seen.sort(State.ORDER);
+            seen.sort(order(seen));
             seen = new ArrayList<>(seen.subList(0, Math.min(seen.size(), 4)));
             width = Math.max(2, (width + 1) / 2);
             current = seen;
         }
-        State best = seen.stream().min(State.ORDER).orElseThrow();
+        State best = seen.stream().min(order(seen)).orElseThrow();
         return new Outcome(best.program(), best.start());
     }
 

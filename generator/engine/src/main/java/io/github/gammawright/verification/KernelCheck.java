@@ -4,7 +4,6 @@ import io.github.gammawright.definition.MetricDefinition;
 import io.github.gammawright.geometry.Quantity;
 import io.github.gammawright.verification.KernelInstance.Defect;
 import io.github.gammawright.verification.reference.ReferenceEvaluator;
-import io.github.gammawright.verification.reference.ReferencePoint;
 import io.github.gammawright.verification.reference.ReferenceQuantity;
 import java.util.ArrayList;
 import java.util.Arrays;
@@ -92,6 +91,7 @@ public final class KernelCheck {
             comparisons.add(
                     QuantityComparison.of(quantity, kernel.layout(), definition.dimension(), instance, settings));
         }
+        ReferenceTrio trio = new ReferenceTrio(evaluator);
         for (int p = 0; p < sample().points().size(); p++) {
             SamplePoint point = sample().points().get(p);
             double[] parameters = point.parameters();
@@ -104,9 +104,9 @@ public final class KernelCheck {
             }
             double[][] vectors = inputs.at(p);
             evaluate(instance, object, point, vectors, comparisons);
-            ReferencePoint reference = evaluator.at(parameters, point.coordinates());
+            trio.moveTo(point);
             for (QuantityComparison comparison : comparisons) {
-                comparison.compare(reference, point, inputs, vectors);
+                comparison.compare(trio, point, inputs, vectors);
             }
         }
         comparisons.forEach(comparison -> report.quantity(comparison.report()));

@@ -69,14 +69,14 @@ final class QuantityComparison {
     }
 
     /** Compares what the kernel has written. */
-    void compare(ReferencePoint at, SamplePoint point, InputArrays inputs, double[][] vectors) {
+    void compare(ReferenceTrio trio, SamplePoint point, InputArrays inputs, double[][] vectors) {
         double[][] own = inputs.select(quantity, vectors);
-        ReferencePoint.Conditioned conditioned = at.conditioned(reference, own);
+        ReferencePoint.Conditioned conditioned = trio.conditioned(reference, point, own);
         List<List<Double>> lists = new ArrayList<>();
         for (double[] vector : own) {
             lists.add(Arrays.stream(vector).boxed().toList());
         }
-        statistics.add(map, conditioned.values(), conditioned.limits(), result, point, lists);
+        statistics.add(map, conditioned, result, () -> trio.noise(reference, point, own), point, lists);
     }
 
     QuantityReport report() {

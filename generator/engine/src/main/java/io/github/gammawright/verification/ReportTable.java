@@ -79,11 +79,10 @@ public final class ReportTable {
     }
 
     private static void details(QuantityReport quantity, StringBuilder text) {
+        quantity.worstUlps().ifPresent(worst -> line(text, "worst by ulp: " + error(quantity, worst)));
         quantity.worstLimits()
-                .ifPresent(worst -> line(
-                        text,
-                        "worst " + where(quantity, worst) + " of " + number(worst.limits()) + " conditioning limits, "
-                                + number(worst.ulps()) + " ulp"));
+                .filter(worst -> !quantity.worstUlps().equals(quantity.worstLimits()))
+                .ifPresent(worst -> line(text, "worst by limit: " + error(quantity, worst)));
         if (quantity.undefined() > 0) {
             line(text, quantity.undefined() + " values of " + quantity.quantity() + " are undefined and not compared");
         }
@@ -95,6 +94,11 @@ public final class ReportTable {
                 text,
                 quantity.violations() + " values out of bounds, worst " + where(quantity, worst) + ": " + worst.actual()
                         + " instead of " + worst.expected()));
+    }
+
+    private static String error(QuantityReport quantity, Deviation deviation) {
+        return number(deviation.ulps()) + " ulp, " + number(deviation.limits()) + " conditioning limits, "
+                + where(quantity, deviation);
     }
 
     private static String where(QuantityReport quantity, Deviation deviation) {

@@ -132,6 +132,37 @@ class KernelCheckTest {
                 .contains("entry 1 of christoffel is no component's");
     }
 
+    /**
+     * The determinant of a metric of the Kerr-Schild form is −1 (Kerr &amp; Schild 1965): the trace is zero, which a kernel
+     * that does not know it finds up to rounding.
+     */
+    @Test
+    void zeroMayComeOutAsRoundingNoise() {
+        assertThat(check(TestMetrics.named("kerr-schild"), constantTrace("3e-16"))
+                        .verdict())
+                .isEqualTo(Verdict.PASSED);
+        KernelReport wrong = check(TestMetrics.named("kerr-schild"), constantTrace("1e-9"));
+        assertThat(wrong.verdict()).isEqualTo(Verdict.FAILED);
+        assertThat(wrong.quantities().get(0).violations()).isEqualTo(200);
+        assertThat(wrong.quantities().get(0).medianUlps()).isNaN();
+    }
+
+    private static KernelUnderTest constantTrace(String value) {
+        return new KernelUnderTest(
+                "trial.Trace", """
+                package trial;
+                public final class Trace {
+                    public static final int LENGTH = 4;
+                    public Trace(double m, double a) {}
+                    public static int index(int k) { return k; }
+                    public boolean inDomain(double[] point) { return true; }
+                    public void evaluate(double[] point, double[] result) {
+                        java.util.Arrays.fill(result, VALUE);
+                    }
+                }
+                """.replace("VALUE", value), List.of(Quantity.CHRISTOFFEL_TRACE), Layout.FULL);
+    }
+
     @Test
     void nothingToCompareIsNoPass() {
         MetricDefinition empty = TestDefinition.of("empty", "theta", "phi")

@@ -66,7 +66,7 @@ class ReportTest {
                           quantity     compared  median ulp  worst ulp  median limit  worst limit  verdict
                           christoffel      4480        0.25    1.1e+15          0.13      4.0e+14  failed
                           metric            700        0.00          -             -            -  passed
-                          worst christoffel[1, 2, 2] at [0.0, 3.25] with parameters [1.0, 0.5] and [0.25] of 4.0e+14 conditioning limits, 1.1e+15 ulp
+                          worst by ulp: 1.1e+15 ulp, 4.0e+14 conditioning limits, christoffel[1, 2, 2] at [0.0, 3.25] with parameters [1.0, 0.5] and [0.25]
                           12 values of christoffel are undefined and not compared
                           3 values out of bounds, worst christoffel[1, 2, 2] at [0.0, 3.25] with parameters [1.0, 0.5] and [0.25]: 2.5 instead of 2.0
                           defect: evaluate changes its inputs

@@ -38,12 +38,29 @@ public final class ReferenceEvaluator {
      * @param digits decimal digits, from 10 to 1,000
      */
     public ReferenceEvaluator(MetricDefinition definition, int digits) {
+        this(definition, digits, RealArithmetic.ofDigits(digits));
         if (digits < 10 || digits > 1000) {
             throw new IllegalArgumentException("digits must be from 10 to 1000, not " + digits);
         }
+    }
+
+    private ReferenceEvaluator(MetricDefinition definition, int digits, RealArithmetic arithmetic) {
         this.definition = definition;
         this.digits = digits;
-        this.functions = new RealFunctions(RealArithmetic.ofDigits(digits));
+        this.functions = new RealFunctions(arithmetic);
+    }
+
+    /**
+     * An evaluator that rounds every operation to the 53 bits of a double, as a plain program would: no reference, but a
+     * measure of the rounding noise that such a program leaves where a value is zero.
+     */
+    public static ReferenceEvaluator inDoublePrecision(MetricDefinition definition) {
+        return new ReferenceEvaluator(definition, 16, new RealArithmetic(53));
+    }
+
+    /** An evaluator in so many digits more, which shows by comparison what of a small number is rounding. */
+    public ReferenceEvaluator finer(int moreDigits) {
+        return new ReferenceEvaluator(definition, digits + moreDigits, RealArithmetic.ofDigits(digits + moreDigits));
     }
 
     private record BasisKey(int variables, int order) {}

@@ -1,43 +1,68 @@
 package io.github.gammawright.emission;
 
+import com.palantir.javapoet.CodeBlock;
 import com.palantir.javapoet.MethodSpec;
 import io.github.gammawright.emission.EmissionContext.InputUse;
 import java.util.BitSet;
 import java.util.List;
 import javax.lang.model.element.Modifier;
 
-/** Writes the private methods that compute the results. */
+/** Writes the private method {@code compute} that every public form of evaluation calls, and those that it calls. */
 final class BodyMethods {
 
     private final EmissionContext context;
+    private final CallerFunctions functions;
     private final Inlining inlining;
+    private final List<Integer> called;
     private final List<InputUse> uses;
+    private int workspaceLength;
 
-    BodyMethods(EmissionContext context) {
+    BodyMethods(EmissionContext context, CallerFunctions functions) {
         this.context = context;
+        this.functions = functions;
         List<Integer> roots = context.kernel().slots().stream()
                 .flatMap(List::stream)
                 .filter(value -> value >= 0)
                 .toList();
         this.inlining = new Inlining(context.program(), roots, context.values()::isGiven, new BitSet());
-        this.uses = context.inputUses(inlining);
+        this.called = functions.used(i -> inlining.uses(i) > 0);
+        this.uses = context.inputUses(i -> inlining.uses(i) > 0, functions.coordinates(called));
     }
 
-    /** The entries of the inputs that the method {@code compute} takes, in its order. */
-    List<InputUse> uses() {
-        return uses;
-    }
-
-    void emit() {
+    /** Writes the methods and says how {@code compute} is called. */
+    ComputeSignature emit() {
+        this.workspaceLength = functions.resultLength(called);
+        boolean scalars = uses.size() <= PartMethods.MOST_ARGUMENTS;
+        CodeBlock work = work();
+        ComputeSignature signature = new ComputeSignature(context.names(), uses, scalars, workspaceLength);
         MethodSpec.Builder method = MethodSpec.methodBuilder("compute").addModifiers(Modifier.PRIVATE);
-        uses.forEach(use -> method.addParameter(double.class, use.name()));
-        for (ArrayTarget target : context.resultTargets()) {
-            method.addParameter(double[].class, target.name());
-            method.addParameter(int.class, target.offset());
+        signature.addParameters(method);
+        if (!scalars) {
+            for (InputUse use : uses) {
+                ArrayTarget array = new ArrayTarget(use.input().name(), signature.offset(use.input()));
+                method.addStatement("double $L = $L", use.name(), array.element(use.index()));
+            }
         }
-        List<Statement> statements = Statements.of(inlining, context.kernel().slots());
-        ExpressionPrinter printer = context.values().printer(inlining, context.functions());
-        method.addCode(new StatementPrinter(printer, context.values(), context.resultTargets()).print(statements));
+        method.addCode(functions.calls(called, i -> inlining.uses(i) > 0, "workspace"));
+        method.addCode(work);
         context.type().addMethod(method.build());
+        return signature;
+    }
+
+    private CodeBlock work() {
+        Body body = new Body(
+                context.program(),
+                inlining,
+                context.values(),
+                Statements.of(inlining, context.kernel().slots()),
+                context.resultTargets());
+        List<List<Statement>> parts = Partition.of(body, new BytecodeSize(body, context.isKeptInArray()));
+        if (parts.size() == 1) {
+            ExpressionPrinter printer = context.values().printer(inlining, context.functions());
+            return new StatementPrinter(printer, context.values(), body.arrays()).print(body.statements());
+        }
+        PartMethods methods = new PartMethods(context, body, parts, "part", workspaceLength);
+        workspaceLength = methods.workspaceLength();
+        return methods.emit();
     }
 }

@@ -6,9 +6,11 @@ import io.github.gammawright.graph.StraightLineProgram;
 import io.github.gammawright.graph.Symbol;
 import java.util.ArrayList;
 import java.util.BitSet;
+import java.util.EnumMap;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.function.IntPredicate;
 
 /**
  * What the writers of a class's parts share.
@@ -28,6 +30,8 @@ record EmissionContext(
         FunctionNames functions,
         BitSet kept,
         TypeSpec.Builder type) {
+
+    private static final int MOST_FIELDS = 300;
 
     static EmissionContext of(KernelModel model, TypeSpec.Builder type) {
         KernelNames names = new KernelNames(model);
@@ -72,22 +76,34 @@ record EmissionContext(
         return targets;
     }
 
-    /** The given entries of inputs that a body uses, in the order of the inputs. */
-    List<InputUse> inputUses(Inlining inlining) {
-        Map<Symbol, Boolean> used = new HashMap<>();
+    /** Whether values on parameters alone are kept in an array, being too many for fields. */
+    boolean isKeptInArray() {
+        return kept.cardinality() > MOST_FIELDS;
+    }
+
+    /**
+     * The entries of inputs that a body uses, in the order of the inputs.
+     *
+     * @param used whether it uses a value of the program
+     * @param coordinates what it uses besides, by the author's names
+     */
+    List<InputUse> inputUses(IntPredicate used, List<String> coordinates) {
+        Map<Symbol.Kind, BitSet> entries = new EnumMap<>(Symbol.Kind.class);
         for (int i = 0; i < program().size(); i++) {
-            if (program().instruction(i) instanceof Instruction.Load load && inlining.uses(i) > 0) {
-                used.put(load.symbol(), true);
+            if (used.test(i) && program().instruction(i) instanceof Instruction.Load load) {
+                Symbol symbol = load.symbol();
+                entries.computeIfAbsent(symbol.kind(), kind -> new BitSet()).set(symbol.index());
             }
+        }
+        for (String coordinate : coordinates) {
+            int index = model.definition().coordinates().indexOf(coordinate);
+            entries.computeIfAbsent(Symbol.Kind.COORDINATE, kind -> new BitSet()).set(index);
         }
         List<InputUse> uses = new ArrayList<>();
         for (KernelInput input : names.inputs()) {
-            for (int i = 0; i < input.length(); i++) {
-                Symbol symbol = Symbol.of(input.kind(), input.coordinates().get(i), i);
-                if (used.containsKey(symbol)) {
-                    uses.add(new InputUse(input, i, names.scalars(input).get(i)));
-                }
-            }
+            entries.getOrDefault(input.kind(), new BitSet()).stream()
+                    .forEach(i -> uses.add(
+                            new InputUse(input, i, names.scalars(input).get(i))));
         }
         return uses;
     }

@@ -23,6 +23,10 @@ record KernelInput(Symbol.Kind kind, String name, List<String> coordinates) {
         return coordinates.size();
     }
 
+    boolean isPoint() {
+        return kind == Symbol.Kind.COORDINATE;
+    }
+
     /** The name for an array of many such inputs. */
     String plural() {
         return name.endsWith("y") ? name.substring(0, name.length() - 1) + "ies" : name + "s";

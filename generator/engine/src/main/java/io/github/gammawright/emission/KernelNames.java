@@ -35,7 +35,7 @@ final class KernelNames {
             "requireDistinct",
             "readResolve",
             "at",
-            "from",
+            "from", "result", "tuple",
             "to",
             "results",
             "values",
@@ -67,6 +67,7 @@ final class KernelNames {
             allocator.reserve(input.name());
             allocator.reserve(input.plural());
             allocator.reserve(input.plural() + "From");
+            allocator.reserve(input.name() + "From");
         }
         for (KernelModel.Result result : model.results()) {
             String name = result.quantity().variableName();
@@ -106,6 +107,11 @@ final class KernelNames {
     /** For temporaries, private methods and everything else that comes later. */
     NameAllocator allocator() {
         return allocator;
+    }
+
+    /** The name of a coordinate as a variable. */
+    String coordinate(String coordinate) {
+        return scalars.get(Symbol.Kind.COORDINATE).get(definition.coordinates().indexOf(coordinate));
     }
 
     List<KernelInput> inputs() {

@@ -8,7 +8,7 @@ import java.util.List;
 final class StatementPrinter {
 
     /** Zeros in a row from this many on are written by one call. */
-    private static final int LONG_RUN = 9;
+    static final int LONG_RUN = 9;
 
     private final ExpressionPrinter expressions;
     private final ValueNames names;

@@ -45,6 +45,16 @@ final class ArgumentChecks {
         return code.build();
     }
 
+    CodeBlock workspace() {
+        CodeBlock.Builder code = CodeBlock.builder();
+        code.addStatement("requireRange($S, workspace.length, 0, WORKSPACE_LENGTH)", "workspace");
+        for (String result : context.names().results()) {
+            distinct = true;
+            code.addStatement("requireDistinct(workspace, $L, $S)", result, "workspace and " + result);
+        }
+        return code.build();
+    }
+
     CodeBlock ranges(List<String> results, Function<KernelInput, String> from, IntFunction<String> to) {
         CodeBlock.Builder code = CodeBlock.builder();
         for (KernelInput input : context.names().inputs()) {
@@ -76,15 +86,14 @@ final class ArgumentChecks {
     }
 
     private static String length(KernelInput input) {
-        return input.kind() == io.github.gammawright.graph.Symbol.Kind.COORDINATE
+        return input.isPoint()
                 ? "DIMENSION"
                 : Integer.toString(input.length());
     }
 
     /** The private methods that the tests call. */
     void emit() {
-        context.type()
-                .addMethod(check("requireLength")
+        context.privateMethods().add(check("requireLength")
                         .addParameter(String.class, "name")
                         .addParameter(int.class, "length")
                         .addParameter(int.class, "required")
@@ -96,8 +105,7 @@ final class ArgumentChecks {
                                 ", not the required ")
                         .endControlFlow()
                         .build());
-        context.type()
-                .addMethod(check("requireRange")
+        context.privateMethods().add(check("requireRange")
                         .addParameter(String.class, "name")
                         .addParameter(int.class, "length")
                         .addParameter(int.class, "from")
@@ -112,8 +120,7 @@ final class ArgumentChecks {
                         .endControlFlow()
                         .build());
         if (distinct) {
-            context.type()
-                    .addMethod(check("requireDistinct")
+            context.privateMethods().add(check("requireDistinct")
                             .addParameter(double[].class, "a")
                             .addParameter(double[].class, "b")
                             .addParameter(String.class, "names")
@@ -121,7 +128,7 @@ final class ArgumentChecks {
                             .addStatement(
                                     "throw new $T(names + $S)",
                                     IllegalArgumentException.class,
-                                    " are one array, but each result needs its own")
+                                    " are one array, but each needs its own")
                             .endControlFlow()
                             .build());
         }

@@ -2,8 +2,10 @@ package io.github.gammawright.emission;
 
 import io.github.gammawright.graph.Instruction;
 import io.github.gammawright.graph.StraightLineProgram;
-import java.util.BitSet;
+import java.util.ArrayList;
+import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Set;
 
 /**
  * A computation that is to be written as one or several private methods.
@@ -44,23 +46,31 @@ record Body(
         return statement instanceof Statement.Store store ? store.value() : -1;
     }
 
-    /** The variables and inputs that a statement reads. */
-    BitSet reads(Statement statement) {
-        BitSet reads = new BitSet();
+    /** The variables and inputs that a statement reads, each once. */
+    List<Integer> reads(Statement statement) {
+        Set<Integer> reads = new LinkedHashSet<>();
         int value = valueOf(statement);
         if (statement instanceof Statement.Define) {
             program.instruction(value).operands().forEach(operand -> collect(operand, reads));
         } else if (value >= 0) {
             collect(value, reads);
         }
-        return reads;
+        return List.copyOf(reads);
     }
 
-    private void collect(int value, BitSet reads) {
+    private void collect(int value, Set<Integer> reads) {
         if (isVariable(value) || isInput(value)) {
-            reads.set(value);
+            reads.add(value);
         } else if (!values.isGiven(value)) {
             program.instruction(value).operands().forEach(operand -> collect(operand, reads));
         }
+    }
+
+    /** The same with the zeros at the end, so that their entries may serve as memory before. */
+    Body withZerosLast() {
+        List<Statement> sorted = new ArrayList<>();
+        statements.stream().filter(s -> !(s instanceof Statement.Zero)).forEach(sorted::add);
+        statements.stream().filter(s -> s instanceof Statement.Zero).forEach(sorted::add);
+        return new Body(program, inlining, values, sorted, arrays);
     }
 }

@@ -31,22 +31,26 @@ final class BodyMethods {
 
     /** Writes the methods and says how {@code compute} is called. */
     ComputeSignature emit() {
-        this.workspaceLength = functions.resultLength(called);
+        workspaceLength = functions.resultLength(called);
         boolean scalars = uses.size() <= PartMethods.MOST_ARGUMENTS;
+        int first = context.privateMethods().size();
         CodeBlock work = work();
         ComputeSignature signature = new ComputeSignature(context.names(), uses, scalars, workspaceLength);
+        context.privateMethods().add(first, compute(signature, work));
+        return signature;
+    }
+
+    private MethodSpec compute(ComputeSignature signature, CodeBlock work) {
         MethodSpec.Builder method = MethodSpec.methodBuilder("compute").addModifiers(Modifier.PRIVATE);
         signature.addParameters(method);
-        if (!scalars) {
+        if (!signature.scalars()) {
             for (InputUse use : uses) {
                 ArrayTarget array = new ArrayTarget(use.input().name(), signature.offset(use.input()));
                 method.addStatement("double $L = $L", use.name(), array.element(use.index()));
             }
         }
         method.addCode(functions.calls(called, i -> inlining.uses(i) > 0, "workspace"));
-        method.addCode(work);
-        context.type().addMethod(method.build());
-        return signature;
+        return method.addCode(work).build();
     }
 
     private CodeBlock work() {
@@ -56,11 +60,13 @@ final class BodyMethods {
                 context.values(),
                 Statements.of(inlining, context.kernel().slots()),
                 context.resultTargets());
-        List<List<Statement>> parts = Partition.of(body, new BytecodeSize(body, context.isKeptInArray()));
+        List<List<Statement>> parts = Partition.of(body, new BytecodeSize(body));
         if (parts.size() == 1) {
-            ExpressionPrinter printer = context.values().printer(inlining, context.functions());
-            return new StatementPrinter(printer, context.values(), body.arrays()).print(body.statements());
+            JavaExpressions printer = context.values().printer(inlining, context.functions());
+            return new JavaStatements(printer, context.values(), body.arrays()).print(body.statements());
         }
+        body = body.withZerosLast();
+        parts = Partition.of(body, new BytecodeSize(body));
         PartMethods methods = new PartMethods(context, body, parts, "part", workspaceLength);
         workspaceLength = methods.workspaceLength();
         return methods.emit();

@@ -22,16 +22,9 @@ final class BytecodeSize {
     static final int ELEMENT = 9;
 
     private final Body body;
-    private final int keptSize;
 
-    /**
-     * Estimates for a body.
-     *
-     * @param keptInArray whether values on parameters alone are in an array instead of fields
-     */
-    BytecodeSize(Body body, boolean keptInArray) {
+    BytecodeSize(Body body) {
         this.body = body;
-        this.keptSize = keptInArray ? ELEMENT : FIELD;
     }
 
     /**
@@ -42,12 +35,17 @@ final class BytecodeSize {
     int of(Statement statement, int locals) {
         int variable = locals < 250 ? NEAR : FAR;
         if (statement instanceof Statement.Zero zero) {
-            return Math.min(zero.to() - zero.from(), StatementPrinter.LONG_RUN + 1) * (ELEMENT + 1);
+            return Math.min(zero.to() - zero.from(), JavaStatements.LONG_RUN + 1) * (ELEMENT + 1);
         }
         if (statement instanceof Statement.Define define) {
             return expression(define.value(), variable) + variable;
         }
         return operand(Body.valueOf(statement), variable) + ELEMENT;
+    }
+
+    /** The bytes of an expression whose variables are near. */
+    int ofExpression(int value) {
+        return operand(value, NEAR);
     }
 
     /** The bytes that move a value between an array and a variable. */
@@ -59,7 +57,11 @@ final class BytecodeSize {
         if (body.isVariable(value) || body.isInput(value)) {
             return variable;
         }
-        return body.values().isGiven(value) ? keptSize : expression(value, variable);
+        String given = body.values().given(value);
+        if (given == null) {
+            return expression(value, variable);
+        }
+        return given.endsWith("]") ? ELEMENT : FIELD;
     }
 
     private int expression(int value, int variable) {

@@ -65,16 +65,58 @@ final class CallerFunctions {
     void emitInterface() {
         TypeSpec.Builder type = TypeSpec.interfaceBuilder(context.names().functionsType())
                 .addModifiers(Modifier.PUBLIC, Modifier.STATIC)
-                .addSuperinterface(Serializable.class);
+                .addSuperinterface(Serializable.class)
+                .addJavadoc(
+                        """
+                        The functions of coordinates that the metric is made of. Each method fills the value and the
+                        derivatives that this class needs into the first entries of an array, and leaves the others
+                        alone. Implementations that many threads use at once must allow for it.
+                        """);
         for (int f = 0; f < functions.size(); f++) {
             MethodSpec.Builder method = MethodSpec.methodBuilder(
                             context.names().functions().get(f))
                     .addModifiers(Modifier.PUBLIC, Modifier.ABSTRACT);
+            method.addJavadoc("$L", javadoc(f));
             arguments(f).forEach(argument -> method.addParameter(double.class, argument));
             method.addParameter(double[].class, "result");
             type.addMethod(method.build());
         }
         context.type().addType(type.build());
+    }
+
+    private String javadoc(int function) {
+        MetricDefinition.CallerFunction of = functions.get(function);
+        StringBuilder text = new StringBuilder("Fills <code>" + JavadocText.escape(of.name()) + "</code>.\n\n");
+        for (int i = 0; i < of.of().size(); i++) {
+            text.append("@param ").append(arguments(function).get(i)).append(" the coordinate ");
+            text.append(JavadocText.escape(of.of().get(i))).append('\n');
+        }
+        text.append("@param result ");
+        List<List<Integer>> entries = orders.get(function);
+        for (int e = 0; e < entries.size(); e++) {
+            text.append(e == 0 ? "" : ",\n    ").append("entry ").append(e).append(": <code>");
+            text.append(JavadocText.escape(derivative(of, entries.get(e)))).append("</code>");
+        }
+        return text.append('\n').toString();
+    }
+
+    /** {@code ∂²nu/∂r∂theta}. */
+    private static String derivative(MetricDefinition.CallerFunction function, List<Integer> orders) {
+        int total = total(orders);
+        if (total == 0) {
+            return function.name();
+        }
+        StringBuilder text = new StringBuilder("∂" + power(total) + function.name() + "/");
+        for (int i = 0; i < orders.size(); i++) {
+            if (orders.get(i) > 0) {
+                text.append('∂').append(function.of().get(i)).append(power(orders.get(i)));
+            }
+        }
+        return text.toString();
+    }
+
+    private static String power(int exponent) {
+        return exponent == 1 ? "" : exponent < 10 ? "" + "⁰¹²³⁴⁵⁶⁷⁸⁹".charAt(exponent) : "^" + exponent;
     }
 
     private List<String> arguments(int function) {

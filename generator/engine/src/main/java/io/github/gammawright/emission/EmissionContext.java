@@ -1,5 +1,6 @@
 package io.github.gammawright.emission;
 
+import com.palantir.javapoet.MethodSpec;
 import com.palantir.javapoet.TypeSpec;
 import io.github.gammawright.graph.Instruction;
 import io.github.gammawright.graph.StraightLineProgram;
@@ -21,6 +22,7 @@ import java.util.function.IntPredicate;
  * @param functions how functions are called
  * @param kept the values on parameters alone that the constructor computes for later
  * @param type the class under construction
+ * @param privateMethods what the class ends with
  */
 record EmissionContext(
         KernelModel model,
@@ -29,9 +31,8 @@ record EmissionContext(
         ValueNames values,
         FunctionNames functions,
         BitSet kept,
-        TypeSpec.Builder type) {
-
-    private static final int MOST_FIELDS = 300;
+        TypeSpec.Builder type,
+        List<MethodSpec> privateMethods) {
 
     static EmissionContext of(KernelModel model, TypeSpec.Builder type) {
         KernelNames names = new KernelNames(model);
@@ -46,7 +47,7 @@ record EmissionContext(
             }
         }
         BitSet kept = ParameterWork.kept(program, roots);
-        return new EmissionContext(model, names, kernel, values, new FunctionNames(model.className()), kept, type);
+        return new EmissionContext(model, names, kernel, values, new FunctionNames(model.className()), kept, type, new ArrayList<>());
     }
 
     StraightLineProgram program() {
@@ -74,11 +75,6 @@ record EmissionContext(
             targets.add(new ArrayTarget(names.results().get(r), names.offsets().get(r)));
         }
         return targets;
-    }
-
-    /** Whether values on parameters alone are kept in an array, being too many for fields. */
-    boolean isKeptInArray() {
-        return kept.cardinality() > MOST_FIELDS;
     }
 
     /**

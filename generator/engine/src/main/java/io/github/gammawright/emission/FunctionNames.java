@@ -5,7 +5,7 @@ import java.util.EnumSet;
 import java.util.Set;
 
 /** Functions as the emitted class calls them; remembers which helpers of its own it needs. */
-final class FunctionNames implements ExpressionPrinter.FunctionCalls {
+final class FunctionNames implements JavaExpressions.FunctionCalls {
 
     private final String math;
     private final Set<RealFunction> helpers = EnumSet.noneOf(RealFunction.class);

@@ -5,6 +5,7 @@ import com.palantir.javapoet.FieldSpec;
 import com.palantir.javapoet.MethodSpec;
 import io.github.gammawright.geometry.Layout;
 import io.github.gammawright.geometry.Shape;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Objects;
 import javax.lang.model.element.Modifier;
@@ -14,25 +15,36 @@ final class IndexMethods {
 
     private static final List<String> INDICES = List.of("l", "k", "i", "j");
 
+    private static final int LARGEST_SWITCH = 128;
+
     private final EmissionContext context;
 
     IndexMethods(EmissionContext context) {
         this.context = context;
     }
 
-    void emit() {
-        constant("DIMENSION", context.model().definition().dimension());
+    void emitLengths() {
+        constant("DIMENSION", "The number of coordinates.", context.model().definition().dimension());
         for (int r = 0; r < context.model().results().size(); r++) {
-            constant(context.lengthConstant(r), context.length(r));
+            String name = context.names().results().get(r);
+            constant(context.lengthConstant(r), "The number of entries of {@code " + name + "}.", context.length(r));
         }
+    }
+
+    void emitWorkspaceLength(int length) {
+        constant("WORKSPACE_LENGTH", "The number of entries that a workspace needs.", length);
+    }
+
+    void emit() {
         for (KernelModel.Result result : context.model().results()) {
             index(result);
         }
     }
 
-    private void constant(String name, int value) {
+    private void constant(String name, String javadoc, int value) {
         context.type()
                 .addField(FieldSpec.builder(int.class, name, Modifier.PUBLIC, Modifier.STATIC, Modifier.FINAL)
+                        .addJavadoc(javadoc)
                         .initializer("$L", value)
                         .build());
     }
@@ -42,7 +54,9 @@ final class IndexMethods {
         String name = context.isSingle() ? "index" : result.quantity().variableName() + "Index";
         MethodSpec.Builder method = MethodSpec.methodBuilder(name)
                 .addModifiers(Modifier.PUBLIC, Modifier.STATIC)
-                .returns(int.class);
+                .returns(int.class)
+                .addJavadoc("$L", MethodJavadoc.index(
+                        result, context.isSingle(), context.model().layout() == Layout.NON_ZERO));
         List<String> indices = names(shape.rank());
         indices.forEach(index -> method.addParameter(int.class, index));
         method.addCode(position(shape, indices, context.model().layout() != Layout.FULL));
@@ -63,7 +77,7 @@ final class IndexMethods {
     }
 
     /** Row-major order, in which the last two indices may be folded to a triangle. */
-    private static CodeBlock position(Shape shape, List<String> indices, boolean packed) {
+    private CodeBlock position(Shape shape, List<String> indices, boolean packed) {
         CodeBlock.Builder code = CodeBlock.builder();
         boolean triangle = packed && shape.symmetricPair();
         int rows = triangle ? shape.rank() - 2 : shape.rank();
@@ -95,8 +109,8 @@ final class IndexMethods {
             int n = shape.extents().get(shape.rank() - 1);
             String i = indices.get(shape.rank() - 2);
             String j = indices.get(shape.rank() - 1);
-            code.addStatement("int row = Math.max($L, $L)", i, j);
-            code.addStatement("int column = Math.min($L, $L)", i, j);
+            code.addStatement("int row = $L.max($L, $L)", context.functions().math(), i, j);
+            code.addStatement("int column = $L.min($L, $L)", context.functions().math(), i, j);
             String former =
                     rows == 0 ? "" : (rows == 1 ? position : "(" + position + ")") + " * " + n * (n + 1) / 2 + " + ";
             position = new StringBuilder(former + "row * (row + 1) / 2 + column");
@@ -105,14 +119,27 @@ final class IndexMethods {
         return code.build();
     }
 
-    private static void lookUp(KernelModel.Result result, MethodSpec.Builder method) {
-        method.beginControlFlow("return switch (position)");
+    private void lookUp(KernelModel.Result result, MethodSpec.Builder method) {
+        int[] slots = new int[result.shape().packedLength()];
+        Arrays.fill(slots, -1);
         for (int slot = 0; slot < result.components().size(); slot++) {
-            int[] tuple =
-                    result.components().get(slot).stream().mapToInt(i -> i).toArray();
-            method.addCode("case $L -> $L;\n", result.shape().packedIndex(tuple), slot);
+            int[] tuple = result.components().get(slot).stream().mapToInt(i -> i).toArray();
+            slots[result.shape().packedIndex(tuple)] = slot;
         }
-        method.addCode("default -> -1;\n");
-        method.endControlFlow("");
+        if (result.components().size() > LARGEST_SWITCH) {
+            String name = context.isSingle() ? "INDEX" : result.quantity().name() + "_INDEX";
+            IndexTable table = new IndexTable(name, slots);
+            table.emit(context.type());
+            method.addCode(table.lookUp());
+            return;
+        }
+        method.beginControlFlow("switch (position)");
+        for (int position = 0; position < slots.length; position++) {
+            if (slots[position] >= 0) {
+                method.addCode("case $L: return $L;\n", position, slots[position]);
+            }
+        }
+        method.addCode("default: return -1;\n");
+        method.endControlFlow();
     }
 }

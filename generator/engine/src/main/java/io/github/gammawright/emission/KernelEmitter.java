@@ -25,16 +25,27 @@ public final class KernelEmitter {
                         .addMember("value", "$S", "all")
                         .build());
         EmissionContext context = EmissionContext.of(model, type);
-        type.addField(
-                FieldSpec.builder(long.class, "serialVersionUID", Modifier.PRIVATE, Modifier.STATIC, Modifier.FINAL)
-                        .initializer("$LL", 1)
-                        .build());
-        new IndexMethods(context).emit();
-        new ConstructorMethods(context).emit();
-        BodyMethods body = new BodyMethods(context);
-        new EntryMethods(context, body.uses()).emit();
-        new DomainMethod(context).emit();
-        body.emit();
+        CallerFunctions functions = new CallerFunctions(context);
+        type.addJavadoc("$L", ClassJavadoc.of(context));
+        type.addField(FieldSpec.builder(
+                        long.class, "serialVersionUID", Modifier.PRIVATE, Modifier.STATIC, Modifier.FINAL)
+                .initializer("$LL", new DefinitionText(model.definition()).serialVersion())
+                .build());
+        IndexMethods indices = new IndexMethods(context);
+        indices.emitLengths();
+        new ConstructorMethods(context, functions).emit();
+        ComputeSignature compute = new BodyMethods(context, functions).emit();
+        if (compute.needsWorkspace()) {
+            indices.emitWorkspaceLength(compute.workspaceLength());
+        }
+        new EntryMethods(context, compute).emit();
+        new DomainMethod(context, functions).emit();
+        indices.emit();
+        new HyperbolicHelpers(context).emit();
+        context.privateMethods().forEach(type::addMethod);
+        if (functions.exist()) {
+            functions.emitInterface();
+        }
         return JavaFile.builder(model.packageName(), type.build())
                 .addFileComment(
                         "$L",

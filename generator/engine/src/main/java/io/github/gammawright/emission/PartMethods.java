@@ -20,7 +20,7 @@ final class PartMethods {
     private final EmissionContext context;
     private final Body body;
     private final List<List<Statement>> parts;
-    private final ExpressionPrinter expressions;
+    private final JavaExpressions expressions;
     private final List<ArrayTarget> arrays;
     private final BitSet arguments;
     private final ValueHomes homes;
@@ -89,8 +89,7 @@ final class PartMethods {
         for (List<Statement> part : parts) {
             Part written = new Part(part);
             String name = context.names().allocator().next(prefix);
-            context.type()
-                    .addMethod(method(name, written.inputs, written.touched)
+            context.privateMethods().add(method(name, written.inputs, written.touched)
                             .addCode(written.code())
                             .build());
             calls.add(call(name, written.inputs, written.touched));
@@ -111,8 +110,7 @@ final class PartMethods {
                 group.add(calls.get(i));
             }
             String name = context.names().allocator().next(prefix + "Group");
-            context.type()
-                    .addMethod(method(name, allRead, allTouched)
+            context.privateMethods().add(method(name, allRead, allTouched)
                             .addCode(group.build())
                             .build());
             code.add(call(name, allRead, allTouched));
@@ -157,7 +155,7 @@ final class PartMethods {
             BitSet read = new BitSet();
             BitSet defined = new BitSet();
             for (Statement statement : statements) {
-                read.or(body.reads(statement));
+                body.reads(statement).forEach(read::set);
                 if (statement instanceof Statement.Define define) {
                     defined.set(define.value());
                     if (homes.isWritten(define.value())) {
@@ -187,7 +185,7 @@ final class PartMethods {
                         : body.values().given(value);
                 code.addStatement("double $L = $L", name, element(value));
             }
-            StatementPrinter printer = new StatementPrinter(expressions, body.values(), arrays);
+            JavaStatements printer = new JavaStatements(expressions, body.values(), arrays);
             for (Statement statement : statements) {
                 code.add(printer.print(List.of(statement)));
                 if (statement instanceof Statement.Define define && homes.isWritten(define.value())) {

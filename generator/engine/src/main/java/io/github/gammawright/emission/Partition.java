@@ -3,7 +3,9 @@ package io.github.gammawright.emission;
 import io.github.gammawright.graph.Instruction;
 import java.util.ArrayList;
 import java.util.BitSet;
+import java.util.HashSet;
 import java.util.List;
+import java.util.Set;
 
 /**
  * Cuts the statements of a body into runs that fit into methods. A body that fits into one method stays whole; else
@@ -28,7 +30,7 @@ final class Partition {
         this.lastUse = new int[body.program().size()];
         for (int s = 0; s < body.statements().size(); s++) {
             int position = s;
-            body.reads(body.statements().get(s)).stream().forEach(value -> lastUse[value] = position);
+            body.reads(body.statements().get(s)).forEach(value -> lastUse[value] = position);
             if (body.statements().get(s) instanceof Statement.Store store) {
                 stored.set(store.value());
             }
@@ -64,8 +66,8 @@ final class Partition {
     /** Where the part that starts at a statement ends. */
     private int end(int from) {
         List<Statement> statements = body.statements();
-        BitSet defined = new BitSet();
-        BitSet loaded = new BitSet();
+        Set<Integer> defined = new HashSet<>();
+        Set<Integer> loaded = new HashSet<>();
         int bytes = 0;
         int operations = 0;
         int locals = 64;
@@ -73,15 +75,15 @@ final class Partition {
         int fewest = Integer.MAX_VALUE;
         for (int s = from; s < statements.size(); s++) {
             Statement statement = statements.get(s);
-            BitSet reads = body.reads(statement);
-            reads.andNot(defined);
-            reads.andNot(loaded);
-            reads.stream().filter(body::isVariable).forEach(loaded::set);
-            int moves = (int) reads.stream().filter(body::isVariable).count();
+            int moves = 0;
+            for (int read : body.reads(statement)) {
+                boolean elsewhere = body.isVariable(read) && !defined.contains(read);
+                moves += elsewhere && loaded.add(read) ? 1 : 0;
+            }
             locals += 2 * moves;
             if (statement instanceof Statement.Define define) {
                 locals += 2;
-                defined.set(define.value());
+                defined.add(define.value());
                 // it may have to be written for a later part
                 moves += stored.get(define.value()) ? 0 : 1;
             }
@@ -104,9 +106,9 @@ final class Partition {
     }
 
     /** What it takes to carry values of this part over a cut; one that is a result already needs no writing. */
-    private int cost(BitSet defined, int cut) {
+    private int cost(Set<Integer> defined, int cut) {
         int cost = 0;
-        for (int value = defined.nextSetBit(0); value >= 0; value = defined.nextSetBit(value + 1)) {
+        for (int value : defined) {
             if (lastUse[value] >= cut) {
                 cost += stored.get(value) ? 1 : 2;
             }

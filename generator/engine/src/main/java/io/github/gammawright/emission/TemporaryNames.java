@@ -70,6 +70,12 @@ final class TemporaryNames {
             String divisor = plainName(arithmetic.right());
             return divisor == null ? null : "inverse" + capitalised(divisor);
         }
+        if (arithmetic.operator() == Operator.MULTIPLY
+                && program.instruction(arithmetic.left()) instanceof Instruction.Constant constant) {
+            String multiple = multiple(constant.value());
+            String factor = plainName(arithmetic.right());
+            return multiple == null || factor == null ? null : multiple + capitalised(factor);
+        }
         Power power = powers[number];
         String base = power.exponent() > 1 ? plainName(power.base()) : null;
         return base == null ? null : powerName(base, power.exponent());
@@ -112,6 +118,16 @@ final class TemporaryNames {
             case CBRT -> "cubeRoot";
             default -> function.symbol();
         };
+    }
+
+    private static String multiple(BigFraction factor) {
+        String[] words = {"two", "three", "four"};
+        for (int i = 0; i < words.length; i++) {
+            if (factor.equals(new BigFraction(i + 2))) {
+                return words[i];
+            }
+        }
+        return factor.equals(BigFraction.ONE_HALF) ? "half" : null;
     }
 
     /** The name of a value that has one, counted names such as {@code t7} excepted. */

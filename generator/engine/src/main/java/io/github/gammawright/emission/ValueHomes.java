@@ -49,7 +49,7 @@ final class ValueHomes {
         for (int p = 0; p < parts.size(); p++) {
             for (Statement statement : parts.get(p)) {
                 int part = p;
-                body.reads(statement).stream().forEach(value -> lastUse.put(value, part));
+                body.reads(statement).forEach(value -> lastUse.put(value, part));
                 if (statement instanceof Statement.Store store) {
                     lastWrite.put(new Home(store.array(), store.slot()), p);
                 } else if (statement instanceof Statement.Zero zero) {

@@ -67,9 +67,9 @@ final class ValueNames {
     }
 
     /** A printer for a body with the given variables. */
-    ExpressionPrinter printer(Inlining inlining, ExpressionPrinter.FunctionCalls functions) {
+    JavaExpressions printer(Inlining inlining, JavaExpressions.FunctionCalls functions) {
         IntFunction<String> names =
                 i -> isGiven(i) ? given(i) : inlining.variables().get(i) ? variable(i) : null;
-        return new ExpressionPrinter(program, names, functions);
+        return new JavaExpressions(program, names, functions);
     }
 }

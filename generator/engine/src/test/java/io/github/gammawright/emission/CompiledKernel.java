@@ -6,6 +6,8 @@ import java.lang.reflect.Method;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Map;
+import java.util.TreeMap;
+import org.objectweb.asm.ClassReader;
 
 /** An emitted class, compiled in memory and called by reflection. */
 final class CompiledKernel {
@@ -57,6 +59,13 @@ final class CompiledKernel {
         } catch (IllegalAccessException e) {
             throw new LinkageError(e.getMessage(), e);
         }
+    }
+
+    /** The bytes of code of every method in every class file. */
+    Map<String, Integer> methodSizes() {
+        Map<String, Integer> sizes = new TreeMap<>();
+        classFiles.forEach((file, bytes) -> MethodSizes.read(new ClassReader(bytes), file, sizes));
+        return sizes;
     }
 
     int constant(String name) {

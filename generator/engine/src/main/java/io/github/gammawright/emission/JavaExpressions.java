@@ -13,7 +13,7 @@ import java.util.function.IntFunction;
  * group otherwise. Operands change places only where addition and multiplication commute, and a minus sign moves only
  * through operations that round symmetrically, both of which IEEE 754 arithmetic leaves exact.
  */
-final class ExpressionPrinter {
+final class JavaExpressions {
 
     private final StraightLineProgram program;
     private final IntFunction<String> names;
@@ -24,7 +24,7 @@ final class ExpressionPrinter {
      *
      * @param names the text by which a value is at hand, null for those to be printed as expressions
      */
-    ExpressionPrinter(StraightLineProgram program, IntFunction<String> names, FunctionCalls functions) {
+    JavaExpressions(StraightLineProgram program, IntFunction<String> names, FunctionCalls functions) {
         this.program = program;
         this.names = names;
         this.functions = functions;

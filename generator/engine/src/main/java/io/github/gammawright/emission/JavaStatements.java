@@ -5,16 +5,16 @@ import java.util.Arrays;
 import java.util.List;
 
 /** Writes statements as Java. */
-final class StatementPrinter {
+final class JavaStatements {
 
     /** Zeros in a row from this many on are written by one call. */
     static final int LONG_RUN = 9;
 
-    private final ExpressionPrinter expressions;
+    private final JavaExpressions expressions;
     private final ValueNames names;
     private final List<ArrayTarget> arrays;
 
-    StatementPrinter(ExpressionPrinter expressions, ValueNames names, List<ArrayTarget> arrays) {
+    JavaStatements(JavaExpressions expressions, ValueNames names, List<ArrayTarget> arrays) {
         this.expressions = expressions;
         this.names = names;
         this.arrays = List.copyOf(arrays);

@@ -86,14 +86,13 @@ final class ArgumentChecks {
     }
 
     private static String length(KernelInput input) {
-        return input.isPoint()
-                ? "DIMENSION"
-                : Integer.toString(input.length());
+        return input.isPoint() ? "DIMENSION" : Integer.toString(input.length());
     }
 
     /** The private methods that the tests call. */
     void emit() {
-        context.privateMethods().add(check("requireLength")
+        context.privateMethods()
+                .add(check("requireLength")
                         .addParameter(String.class, "name")
                         .addParameter(int.class, "length")
                         .addParameter(int.class, "required")
@@ -105,7 +104,8 @@ final class ArgumentChecks {
                                 ", not the required ")
                         .endControlFlow()
                         .build());
-        context.privateMethods().add(check("requireRange")
+        context.privateMethods()
+                .add(check("requireRange")
                         .addParameter(String.class, "name")
                         .addParameter(int.class, "length")
                         .addParameter(int.class, "from")
@@ -120,7 +120,8 @@ final class ArgumentChecks {
                         .endControlFlow()
                         .build());
         if (distinct) {
-            context.privateMethods().add(check("requireDistinct")
+            context.privateMethods()
+                    .add(check("requireDistinct")
                             .addParameter(double[].class, "a")
                             .addParameter(double[].class, "b")
                             .addParameter(String.class, "names")

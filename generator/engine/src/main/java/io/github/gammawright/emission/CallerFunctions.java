@@ -66,8 +66,7 @@ final class CallerFunctions {
         TypeSpec.Builder type = TypeSpec.interfaceBuilder(context.names().functionsType())
                 .addModifiers(Modifier.PUBLIC, Modifier.STATIC)
                 .addSuperinterface(Serializable.class)
-                .addJavadoc(
-                        """
+                .addJavadoc("""
                         The functions of coordinates that the metric is made of. Each method fills the value and the
                         derivatives that this class needs into the first entries of an array, and leaves the others
                         alone. Implementations that many threads use at once must allow for it.
@@ -140,7 +139,10 @@ final class CallerFunctions {
 
     /** The coordinates that calls of the functions take, by the author's names. */
     List<String> coordinates(List<Integer> used) {
-        return used.stream().flatMap(f -> functions.get(f).of().stream()).distinct().toList();
+        return used.stream()
+                .flatMap(f -> functions.get(f).of().stream())
+                .distinct()
+                .toList();
     }
 
     /** The entries that calls of the functions fill, at most. */
@@ -154,8 +156,7 @@ final class CallerFunctions {
         for (int f : used) {
             List<String> arguments = new ArrayList<>(arguments(f));
             arguments.add(array);
-            code.addStatement(
-                    "functions.$L($L)", context.names().functions().get(f), String.join(", ", arguments));
+            code.addStatement("functions.$L($L)", context.names().functions().get(f), String.join(", ", arguments));
             for (int i = 0; i < orders.get(f).size(); i++) {
                 int load = load(f, orders.get(f).get(i));
                 if (load >= 0 && usesValue.test(load)) {

@@ -29,11 +29,13 @@ final class ClassJavadoc {
 
     private void metric() {
         String title = definition.title().isBlank() ? "the metric " + definition.name() : definition.title();
-        String quantities = String.join(", ", context.model().results().stream()
-                .map(result -> words(result) + " (" + result.quantity().formula() + ")")
-                .toList());
-        text.append(JavadocText.wrap(capitalised(JavadocText.escape(quantities)) + " of " + JavadocText.escape(title)
-                + "."));
+        String quantities = String.join(
+                ", ",
+                context.model().results().stream()
+                        .map(result -> words(result) + " (" + result.quantity().formula() + ")")
+                        .toList());
+        text.append(JavadocText.wrap(
+                capitalised(JavadocText.escape(quantities)) + " of " + JavadocText.escape(title) + "."));
         text.append("\n\n<pre>\n");
         for (String formula : new DefinitionText(definition).formulas()) {
             text.append(JavadocText.escape(formula.replace('\n', ' '))).append('\n');
@@ -60,8 +62,10 @@ final class ClassJavadoc {
             if (!parameter.unit().isBlank()) {
                 item.append(" [").append(JavadocText.escape(parameter.unit())).append(']');
             }
-            parameter.defaultExpression().ifPresent(expression -> item.append("; by default ")
-                    .append(code(ExpressionPrinter.print(expression))));
+            parameter
+                    .defaultExpression()
+                    .ifPresent(expression ->
+                            item.append("; by default ").append(code(ExpressionPrinter.print(expression))));
             text.append(JavadocText.wrap("<li>" + item + "</li>")).append('\n');
         }
         text.append("</ul>\n");
@@ -70,9 +74,11 @@ final class ClassJavadoc {
     private void functions() {
         if (!definition.functions().isEmpty()) {
             paragraph("The functions "
-                    + code(String.join(", ", definition.functions().stream()
-                            .map(MetricDefinition.CallerFunction::name)
-                            .toList()))
+                    + code(String.join(
+                            ", ",
+                            definition.functions().stream()
+                                    .map(MetricDefinition.CallerFunction::name)
+                                    .toList()))
                     + " are the caller's: see {@link " + context.names().functionsType() + "}.");
         }
     }

@@ -74,8 +74,7 @@ final class Conditions {
      * @param operand the text of each value
      * @param parameter the name of each loaded value
      */
-    CodeBlock requirement(
-            KernelModel.Condition condition, IntFunction<String> operand, IntFunction<String> parameter) {
+    CodeBlock requirement(KernelModel.Condition condition, IntFunction<String> operand, IntFunction<String> parameter) {
         BitSet all = new BitSet();
         all.set(0, program.size());
         List<CodeBlock> values = new ArrayList<>();
@@ -83,13 +82,13 @@ final class Conditions {
         for (int i = behind.nextSetBit(0); i >= 0; i = behind.nextSetBit(i + 1)) {
             if (program.instruction(i) instanceof Instruction.Load load) {
                 String separator = values.isEmpty() ? "" : ", ";
-                values.add(CodeBlock.of(
-                        "\n+ $S + $L", separator + load.symbol().name() + " = ", parameter.apply(i)));
+                values.add(CodeBlock.of("\n+ $S + $L", separator + load.symbol().name() + " = ", parameter.apply(i)));
             }
         }
         String text = "the parameters do not meet the condition " + condition.text();
         CodeBlock.Builder code = CodeBlock.builder();
-        code.add("if ($L) {\n", LineBreaks.wrap("!(" + comparisons(condition, operand) + ")")).indent();
+        code.add("if ($L) {\n", LineBreaks.wrap("!(" + comparisons(condition, operand) + ")"))
+                .indent();
         code.add("throw new $T(", IllegalArgumentException.class).indent().indent();
         code.add("$S", values.isEmpty() ? text : text + ": ");
         values.forEach(code::add);

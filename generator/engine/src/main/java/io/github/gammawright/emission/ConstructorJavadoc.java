@@ -21,15 +21,16 @@ final class ConstructorJavadoc {
 
     String ofParameters() {
         MetricDefinition definition = context.model().definition();
-        boolean none = definition.parameters().isEmpty() && definition.functions().isEmpty();
+        boolean none =
+                definition.parameters().isEmpty() && definition.functions().isEmpty();
         StringBuilder text = new StringBuilder(
                 none ? "A kernel; the metric has no parameters.\n" : "A kernel for the given parameters.\n\n");
         for (int i = 0; i < definition.parameters().size(); i++) {
             MetricDefinition.Parameter parameter = definition.parameters().get(i);
             String description = parameter.description().isBlank() ? "the parameter" : parameter.description();
             String unit = parameter.unit().isBlank() ? "" : " [" + parameter.unit() + "]";
-            text.append(JavadocText.wrap("@param " + context.names().parameters().get(i) + " "
-                            + JavadocText.escape(description + unit)))
+            text.append(JavadocText.wrap("@param "
+                            + context.names().parameters().get(i) + " " + JavadocText.escape(description + unit)))
                     .append('\n');
         }
         if (!definition.functions().isEmpty()) {

@@ -52,7 +52,9 @@ final class ConstructorMethods {
         Inlining inlining = inlining(new BitSet());
         if (isSmall(inlining)) {
             constructor.addCode(work(inlining));
-            for (int i = context.kept().nextSetBit(0); i >= 0; i = context.kept().nextSetBit(i + 1)) {
+            for (int i = context.kept().nextSetBit(0);
+                    i >= 0;
+                    i = context.kept().nextSetBit(i + 1)) {
                 String name = context.values().variable(i);
                 context.type().addField(double.class, name, Modifier.PRIVATE, Modifier.FINAL, Modifier.TRANSIENT);
                 context.values().give(i, name);
@@ -108,8 +110,7 @@ final class ConstructorMethods {
     private void define(BitSet values, JavaExpressions expressions, CodeBlock.Builder code) {
         for (int i = values.nextSetBit(0); i >= 0; i = values.nextSetBit(i + 1)) {
             String type = context.kept().get(i) ? "" : "double ";
-            code.add("$L;\n",
-                    LineBreaks.wrap(type + context.values().variable(i) + " = " + expressions.definition(i)));
+            code.add("$L;\n", LineBreaks.wrap(type + context.values().variable(i) + " = " + expressions.definition(i)));
         }
     }
 
@@ -150,8 +151,10 @@ final class ConstructorMethods {
     }
 
     private void noArguments() {
-        List<MetricDefinition.Parameter> parameters = context.model().definition().parameters();
-        boolean defaults = parameters.stream().allMatch(p -> p.defaultExpression().isPresent());
+        List<MetricDefinition.Parameter> parameters =
+                context.model().definition().parameters();
+        boolean defaults =
+                parameters.stream().allMatch(p -> p.defaultExpression().isPresent());
         if (!defaults || parameters.isEmpty() || functions.exist()) {
             return;
         }
@@ -176,8 +179,10 @@ final class ConstructorMethods {
                 .add(MethodSpec.methodBuilder("readResolve")
                         .addModifiers(Modifier.PRIVATE)
                         .returns(Object.class)
-                        .addCode("return $L;\n", LineBreaks.wrap("new " + context.model().className() + "("
-                                + String.join(", ", arguments) + ")"))
+                        .addCode(
+                                "return $L;\n",
+                                LineBreaks.wrap("new " + context.model().className() + "("
+                                        + String.join(", ", arguments) + ")"))
                         .build());
     }
 }

@@ -41,8 +41,9 @@ final class DefinitionText {
             lines.add("spatial ds^2 = " + ExpressionPrinter.print(split.spatialLineElement()));
         } else if (form instanceof MetricForm.Coframe coframe) {
             for (int i = 0; i < coframe.oneForms().size(); i++) {
-                lines.add("e[" + i + "] = " + ExpressionPrinter.print(coframe.oneForms().get(i))
-                        + "   (square counts " + (coframe.signs().get(i) < 0 ? "-" : "+") + "1)");
+                lines.add("e[" + i + "] = "
+                        + ExpressionPrinter.print(coframe.oneForms().get(i)) + "   (square counts "
+                        + (coframe.signs().get(i) < 0 ? "-" : "+") + "1)");
             }
         }
         for (MetricDefinition.Abbreviation abbreviation : definition.abbreviations()) {
@@ -74,7 +75,7 @@ final class DefinitionText {
         }
         long version = 0;
         for (int i = 0; i < Long.BYTES; i++) {
-            version = version << Byte.SIZE | digest[i] & 0xFF;
+            version = (version << Byte.SIZE) | (digest[i] & 0xFF);
         }
         return version;
     }

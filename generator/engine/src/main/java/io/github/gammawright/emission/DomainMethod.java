@@ -143,8 +143,7 @@ final class DomainMethod {
                             .addStatement("return true")
                             .build());
             String arguments = String.join(", ", inputs);
-            code.beginControlFlow(
-                    "if (!$L(operands$L))", name, arguments.isEmpty() ? "" : ", " + arguments);
+            code.beginControlFlow("if (!$L(operands$L))", name, arguments.isEmpty() ? "" : ", " + arguments);
             code.addStatement("return false");
             code.endControlFlow();
         }

@@ -47,7 +47,8 @@ record EmissionContext(
             }
         }
         BitSet kept = ParameterWork.kept(program, roots);
-        return new EmissionContext(model, names, kernel, values, new FunctionNames(model.className()), kept, type, new ArrayList<>());
+        return new EmissionContext(
+                model, names, kernel, values, new FunctionNames(model.className()), kept, type, new ArrayList<>());
     }
 
     StraightLineProgram program() {
@@ -93,13 +94,14 @@ record EmissionContext(
         }
         for (String coordinate : coordinates) {
             int index = model.definition().coordinates().indexOf(coordinate);
-            entries.computeIfAbsent(Symbol.Kind.COORDINATE, kind -> new BitSet()).set(index);
+            entries.computeIfAbsent(Symbol.Kind.COORDINATE, kind -> new BitSet())
+                    .set(index);
         }
         List<InputUse> uses = new ArrayList<>();
         for (KernelInput input : names.inputs()) {
             entries.getOrDefault(input.kind(), new BitSet()).stream()
-                    .forEach(i -> uses.add(
-                            new InputUse(input, i, names.scalars(input).get(i))));
+                    .forEach(i ->
+                            uses.add(new InputUse(input, i, names.scalars(input).get(i))));
         }
         return uses;
     }

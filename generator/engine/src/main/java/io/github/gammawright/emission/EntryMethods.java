@@ -87,7 +87,8 @@ final class EntryMethods {
             method.addParameter(double[].class, input.plural());
             method.addParameter(int.class, from(input));
         }
-        List<String> results = context.isSingle() ? List.of("results") : context.names().results();
+        List<String> results =
+                context.isSingle() ? List.of("results") : context.names().results();
         List<String> targets = new ArrayList<>();
         for (int r = 0; r < results.size(); r++) {
             method.addParameter(double[].class, results.get(r));
@@ -96,8 +97,8 @@ final class EntryMethods {
         }
         method.addJavadoc("$L", MethodJavadoc.evaluateAt(context, compute.needsWorkspace()));
         method.addCode(checks.ranges(results, EntryMethods::from, this::to));
-        method.addCode("$L;\n", compute.call(
-                        input -> new ArrayTarget(input.plural(), from(input)), NEW_WORKSPACE, targets));
+        method.addCode(
+                "$L;\n", compute.call(input -> new ArrayTarget(input.plural(), from(input)), NEW_WORKSPACE, targets));
         context.type().addMethod(method.build());
     }
 

@@ -19,11 +19,12 @@ final class HyperbolicHelpers {
     void emit() {
         for (RealFunction function : context.functions().helpers()) {
             context.privateMethods()
-                    .add(switch (function) {
-                        case ASINH -> asinh();
-                        case ACOSH -> acosh();
-                        default -> atanh();
-                    });
+                    .add(
+                            switch (function) {
+                                case ASINH -> asinh();
+                                case ACOSH -> acosh();
+                                default -> atanh();
+                            });
         }
     }
 

@@ -24,7 +24,10 @@ final class IndexMethods {
     }
 
     void emitLengths() {
-        constant("DIMENSION", "The number of coordinates.", context.model().definition().dimension());
+        constant(
+                "DIMENSION",
+                "The number of coordinates.",
+                context.model().definition().dimension());
         for (int r = 0; r < context.model().results().size(); r++) {
             String name = context.names().results().get(r);
             constant(context.lengthConstant(r), "The number of entries of {@code " + name + "}.", context.length(r));
@@ -55,8 +58,10 @@ final class IndexMethods {
         MethodSpec.Builder method = MethodSpec.methodBuilder(name)
                 .addModifiers(Modifier.PUBLIC, Modifier.STATIC)
                 .returns(int.class)
-                .addJavadoc("$L", MethodJavadoc.index(
-                        result, context.isSingle(), context.model().layout() == Layout.NON_ZERO));
+                .addJavadoc(
+                        "$L",
+                        MethodJavadoc.index(
+                                result, context.isSingle(), context.model().layout() == Layout.NON_ZERO));
         List<String> indices = names(shape.rank());
         indices.forEach(index -> method.addParameter(int.class, index));
         method.addCode(position(shape, indices, context.model().layout() != Layout.FULL));
@@ -123,7 +128,8 @@ final class IndexMethods {
         int[] slots = new int[result.shape().packedLength()];
         Arrays.fill(slots, -1);
         for (int slot = 0; slot < result.components().size(); slot++) {
-            int[] tuple = result.components().get(slot).stream().mapToInt(i -> i).toArray();
+            int[] tuple =
+                    result.components().get(slot).stream().mapToInt(i -> i).toArray();
             slots[result.shape().packedIndex(tuple)] = slot;
         }
         if (result.components().size() > LARGEST_SWITCH) {

@@ -51,7 +51,7 @@ final class IndexTable {
         for (int i = from; i < to; i++) {
             int value = entries[i] + 1;
             text.append((char) (ZERO + (value >>> 12)))
-                    .append((char) (ZERO + (value >>> 6 & 63)))
+                    .append((char) (ZERO + ((value >>> 6) & 63)))
                     .append((char) (ZERO + (value & 63)));
         }
         List<CodeBlock> lines = new ArrayList<>();

@@ -23,7 +23,9 @@ final class JavadocText {
             } else if ("<>&@{}\\*/".indexOf(c) >= 0 && isDangerous(c, escaped)) {
                 escaped.append("&#").append(c).append(';');
             } else if (isInvisible(c)) {
-                escaped.append("&#x").append(Integer.toHexString(c).toUpperCase(Locale.ROOT)).append(';');
+                escaped.append("&#x")
+                        .append(Integer.toHexString(c).toUpperCase(Locale.ROOT))
+                        .append(';');
             } else if (c >= 0xD800 && c < 0xE000) {
                 escaped.append('?');
             } else {

@@ -44,11 +44,7 @@ final class KeptArray {
             statements.add(new Statement.Store(0, entry, entries.get(entry)));
         }
         Body body = new Body(
-                context.program(),
-                inlining,
-                context.values(),
-                statements,
-                List.of(new ArrayTarget(array, null)));
+                context.program(), inlining, context.values(), statements, List.of(new ArrayTarget(array, null)));
         List<List<Statement>> parts = Partition.of(body, new BytecodeSize(body));
         PartMethods methods = new PartMethods(context, body, parts, prefix, workspaceLength);
         workspaceLength = methods.workspaceLength();

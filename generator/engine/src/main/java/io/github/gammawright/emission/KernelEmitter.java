@@ -27,10 +27,10 @@ public final class KernelEmitter {
         EmissionContext context = EmissionContext.of(model, type);
         CallerFunctions functions = new CallerFunctions(context);
         type.addJavadoc("$L", ClassJavadoc.of(context));
-        type.addField(FieldSpec.builder(
-                        long.class, "serialVersionUID", Modifier.PRIVATE, Modifier.STATIC, Modifier.FINAL)
-                .initializer("$LL", new DefinitionText(model.definition()).serialVersion())
-                .build());
+        type.addField(
+                FieldSpec.builder(long.class, "serialVersionUID", Modifier.PRIVATE, Modifier.STATIC, Modifier.FINAL)
+                        .initializer("$LL", new DefinitionText(model.definition()).serialVersion())
+                        .build());
         IndexMethods indices = new IndexMethods(context);
         indices.emitLengths();
         new ConstructorMethods(context, functions).emit();

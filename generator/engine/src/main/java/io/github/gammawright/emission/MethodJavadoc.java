@@ -17,7 +17,8 @@ final class MethodJavadoc {
 
     static String evaluateWith(EmissionContext context) {
         StringBuilder text = new StringBuilder("Evaluates at a point with the caller's memory. Allocates nothing.\n\n");
-        text.append("@param workspace at least {@code WORKSPACE_LENGTH} entries, overwritten; in use by one thread at a")
+        text.append(
+                        "@param workspace at least {@code WORKSPACE_LENGTH} entries, overwritten; in use by one thread at a")
                 .append("\n    time, and none of the results\n");
         inputs(context, text);
         results(context, text);
@@ -28,19 +29,25 @@ final class MethodJavadoc {
         StringBuilder text = new StringBuilder("The values at a point, in a new array.\n\n");
         inputs(context, text);
         text.append("@return ").append(entries(context, 0)).append('\n');
-        return text.append("@throws IllegalArgumentException if an array has a wrong length\n").toString();
+        return text.append("@throws IllegalArgumentException if an array has a wrong length\n")
+                .toString();
     }
 
     static String evaluateAt(EmissionContext context, boolean allocates) {
         StringBuilder text = new StringBuilder("Evaluates at a point that is part of a larger array.");
         text.append(allocates ? " Allocates one workspace.\n\n" : " Allocates nothing.\n\n");
         for (KernelInput input : context.names().inputs()) {
-            text.append("@param ").append(input.plural()).append(" holds the ").append(input.name()).append('\n');
+            text.append("@param ")
+                    .append(input.plural())
+                    .append(" holds the ")
+                    .append(input.name())
+                    .append('\n');
             String from = input.isPoint() ? "from" : input.plural() + "From";
             text.append("@param ").append(from).append(" where it starts\n");
         }
         for (int r = 0; r < context.names().results().size(); r++) {
-            String name = context.isSingle() ? "results" : context.names().results().get(r);
+            String name =
+                    context.isSingle() ? "results" : context.names().results().get(r);
             String to = context.isSingle() ? "to" : name + "To";
             text.append("@param ").append(name).append(" where the result goes\n");
             text.append("@param ").append(to).append(" where its first entry goes\n");

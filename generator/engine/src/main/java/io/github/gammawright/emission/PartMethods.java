@@ -5,6 +5,7 @@ import com.palantir.javapoet.MethodSpec;
 import java.util.ArrayList;
 import java.util.BitSet;
 import java.util.List;
+import java.util.Set;
 import java.util.TreeSet;
 import javax.lang.model.element.Modifier;
 
@@ -55,7 +56,8 @@ final class PartMethods {
 
     private BitSet inputsOf(List<Statement> part) {
         BitSet inputs = new BitSet();
-        part.forEach(statement -> body.reads(statement).stream().filter(body::isInput).forEach(inputs::set));
+        part.forEach(statement ->
+                body.reads(statement).stream().filter(body::isInput).forEach(inputs::set));
         return inputs;
     }
 
@@ -85,11 +87,12 @@ final class PartMethods {
         }
         List<CodeBlock> calls = new ArrayList<>();
         List<BitSet> read = new ArrayList<>();
-        List<TreeSet<Integer>> touched = new ArrayList<>();
+        List<Set<Integer>> touched = new ArrayList<>();
         for (List<Statement> part : parts) {
             Part written = new Part(part);
             String name = context.names().allocator().next(prefix);
-            context.privateMethods().add(method(name, written.inputs, written.touched)
+            context.privateMethods()
+                    .add(method(name, written.inputs, written.touched)
                             .addCode(written.code())
                             .build());
             calls.add(call(name, written.inputs, written.touched));
@@ -110,7 +113,8 @@ final class PartMethods {
                 group.add(calls.get(i));
             }
             String name = context.names().allocator().next(prefix + "Group");
-            context.privateMethods().add(method(name, allRead, allTouched)
+            context.privateMethods()
+                    .add(method(name, allRead, allTouched)
                             .addCode(group.build())
                             .build());
             code.add(call(name, allRead, allTouched));
@@ -118,9 +122,11 @@ final class PartMethods {
         return code.build();
     }
 
-    private MethodSpec.Builder method(String name, BitSet inputs, TreeSet<Integer> touched) {
+    private MethodSpec.Builder method(String name, BitSet inputs, Set<Integer> touched) {
         MethodSpec.Builder method = MethodSpec.methodBuilder(name).addModifiers(Modifier.PRIVATE);
-        inputs.stream().forEach(input -> method.addParameter(double.class, body.values().given(input)));
+        inputs.stream()
+                .forEach(
+                        input -> method.addParameter(double.class, body.values().given(input)));
         for (int array : touched) {
             method.addParameter(double[].class, arrays.get(array).name());
             if (arrays.get(array).offset() != null) {
@@ -130,7 +136,7 @@ final class PartMethods {
         return method;
     }
 
-    private CodeBlock call(String name, BitSet inputs, TreeSet<Integer> touched) {
+    private CodeBlock call(String name, BitSet inputs, Set<Integer> touched) {
         List<String> arguments = new ArrayList<>();
         inputs.stream().forEach(input -> arguments.add(body.values().given(input)));
         touched.forEach(array -> arguments.add(arrays.get(array).argument()));
@@ -189,7 +195,8 @@ final class PartMethods {
             for (Statement statement : statements) {
                 code.add(printer.print(List.of(statement)));
                 if (statement instanceof Statement.Define define && homes.isWritten(define.value())) {
-                    code.addStatement("$L = $L", element(define.value()), body.values().variable(define.value()));
+                    code.addStatement(
+                            "$L = $L", element(define.value()), body.values().variable(define.value()));
                 }
             }
             return code.build();

@@ -133,7 +133,8 @@ final class Partition {
 
     private int operations(int value) {
         Instruction instruction = body.program().instruction(value);
-        int operations = instruction instanceof Instruction.Arithmetic || instruction instanceof Instruction.Call ? 1 : 0;
+        int operations =
+                instruction instanceof Instruction.Arithmetic || instruction instanceof Instruction.Call ? 1 : 0;
         for (int operand : instruction.operands()) {
             boolean inlined = !body.isVariable(operand) && !body.values().isGiven(operand);
             operations += inlined ? operations(operand) : 0;

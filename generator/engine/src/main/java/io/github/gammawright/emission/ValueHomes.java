@@ -101,8 +101,8 @@ final class ValueHomes {
         Pool(Map<Home, Integer> lastWrite) {
             this.lastWrite = lastWrite;
             lastWrite.entrySet().stream()
-                    .sorted(Map.Entry.comparingByKey(java.util.Comparator.comparingInt(Home::array)
-                            .thenComparingInt(Home::slot)))
+                    .sorted(Map.Entry.comparingByKey(
+                            java.util.Comparator.comparingInt(Home::array).thenComparingInt(Home::slot)))
                     .forEach(entry -> give(entry.getKey()));
         }
 

@@ -31,15 +31,20 @@ class RandomProgramTest {
     void severalResultsShareTheirWork(@ForAll @IntRange(min = 0, max = 1_000_000) int seed, @ForAll Layout layout) {
         check(
                 RandomModels.model(
-                        seed, 3, 80, 20, layout, Quantity.METRIC, Quantity.GEODESIC_ACCELERATION,
-                        Quantity.VOLUME_ELEMENT, Quantity.HAMILTONIAN_FLOW),
+                        seed,
+                        3,
+                        80,
+                        20,
+                        layout,
+                        Quantity.METRIC,
+                        Quantity.GEODESIC_ACCELERATION,
+                        Quantity.VOLUME_ELEMENT,
+                        Quantity.HAMILTONIAN_FLOW),
                 seed);
     }
 
     @ParameterizedTest
-    @CsvSource({
-        "2, 900, 0", "2, 900, 40", "4, 3000, 60", "6, 15000, 100", "8, 5000, 5", "16, 4000, 0"
-    })
+    @CsvSource({"2, 900, 0", "2, 900, 40", "4, 3000, 60", "6, 15000, 100", "8, 5000, 5", "16, 4000, 0"})
     void largeProgramsAreSplit(int dimension, int operations, int recent) {
         check(
                 RandomModels.model(
@@ -66,7 +71,8 @@ class RandomProgramTest {
     private static void check(TestModel recipe, long seed) {
         KernelModel model = recipe.build();
         CompiledKernel kernel = CompiledKernel.of(model);
-        kernel.methodSizes().forEach((method, size) -> assertThat(size).as(method).isLessThanOrEqualTo(7000));
+        kernel.methodSizes()
+                .forEach((method, size) -> assertThat(size).as(method).isLessThanOrEqualTo(7000));
         double[] values = DoubleInterpreter.run(model.program(), symbol -> RandomModels.input(symbol, seed));
         Object created = kernel.create(
                 RandomModels.input(Symbol.of(Symbol.Kind.PARAMETER, "p0", 0), seed),
@@ -92,7 +98,9 @@ class RandomProgramTest {
                 int value = model.results().get(r).slots().get(slot);
                 double expected = value < 0 ? 0.0 : values[value];
                 assertThat(Double.doubleToLongBits(results.get(r)[slot]))
-                        .as("result %d, entry %d, seed %d: %s instead of %s", r, slot, seed, results.get(r)[slot], expected)
+                        .as(
+                                "result %d, entry %d, seed %d: %s instead of %s",
+                                r, slot, seed, results.get(r)[slot], expected)
                         .isEqualTo(Double.doubleToLongBits(expected));
             }
         }

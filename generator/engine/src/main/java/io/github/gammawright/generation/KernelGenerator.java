@@ -1,18 +1,11 @@
 package io.github.gammawright.generation;
 
-import io.github.gammawright.definition.Expressions;
 import io.github.gammawright.definition.MetricDefinition;
-import io.github.gammawright.definition.MetricForm;
-import io.github.gammawright.diagnostic.DiagnosticCode;
-import io.github.gammawright.diagnostic.Diagnostics;
-import io.github.gammawright.diagnostic.SourcePosition;
 import io.github.gammawright.emission.KernelEmitter;
-import io.github.gammawright.geometry.DegenerateMetricException;
 import io.github.gammawright.geometry.DomainPoints;
 import io.github.gammawright.geometry.DomainProgram;
 import io.github.gammawright.geometry.MetricGraphBuilder;
 import io.github.gammawright.geometry.Route;
-import io.github.gammawright.geometry.UndefinedValueException;
 import io.github.gammawright.graph.LoweredProgram;
 import io.github.gammawright.optimiser.Optimiser;
 import java.util.ArrayList;
@@ -30,34 +23,7 @@ public final class KernelGenerator {
      *     its metric is built, such as a determinant that vanishes identically
      */
     public GeneratedClass generate(MetricDefinition definition, KernelSpecification specification) {
-        try {
-            return make(definition, specification);
-        } catch (UndefinedValueException e) {
-            Diagnostics diagnostics = new Diagnostics(definition.source());
-            diagnostics.report(DiagnosticCode.DIVISION_BY_ZERO, e.position());
-            diagnostics.throwIfAny();
-            throw e;
-        } catch (DegenerateMetricException e) {
-            Diagnostics diagnostics = new Diagnostics(definition.source());
-            diagnostics.report(
-                    DiagnosticCode.METRIC_DEGENERATE, position(definition.form()), "the determinant of the metric");
-            diagnostics.throwIfAny();
-            throw e;
-        }
-    }
-
-    /** Where the metric is written. */
-    private static SourcePosition position(MetricForm form) {
-        if (form instanceof MetricForm.LineElement lineElement) {
-            return Expressions.start(lineElement.expression());
-        }
-        if (form instanceof MetricForm.Matrix matrix) {
-            return Expressions.start(matrix.rows().get(0).get(0));
-        }
-        if (form instanceof MetricForm.ThreePlusOne split) {
-            return Expressions.start(split.spatialLineElement());
-        }
-        return Expressions.start(((MetricForm.Coframe) form).oneForms().get(0));
+        return MetricMistakes.reported(definition, () -> make(definition, specification));
     }
 
     private static GeneratedClass make(MetricDefinition definition, KernelSpecification specification) {

@@ -3,7 +3,6 @@ package io.github.gammawright.geometry;
 import io.github.gammawright.graph.Differentiation;
 import io.github.gammawright.graph.ExpressionGraph;
 import io.github.gammawright.graph.Node;
-import io.github.gammawright.graph.RealFunction;
 import io.github.gammawright.graph.Symbol;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
@@ -42,7 +41,7 @@ public final class Geometry {
         switch (quantity) {
             case METRIC -> addMatrix(metric.components(), components);
             case INVERSE_METRIC -> addMatrix(inverse().components(), components);
-            case VOLUME_ELEMENT -> components.add(volumeElement());
+            case VOLUME_ELEMENT -> components.add(VolumeElement.of(graph, determinant()));
             case METRIC_DERIVATIVE -> addTensor(metricDerivative(), components);
             case CHRISTOFFEL -> addTensor(christoffel(), components);
             case CHRISTOFFEL_FIRST_KIND -> addTensor(firstKind(), components);
@@ -135,25 +134,9 @@ public final class Geometry {
         return christoffel;
     }
 
-    /** √|det g|, factor by factor, so that squares lose their root. */
-    private Node volumeElement() {
-        return absoluteRoot(inverse().determinant());
-    }
-
-    private Node absoluteRoot(Node node) {
-        if (node instanceof Node.Multiple multiple) {
-            return graph.multiply(
-                    graph.sqrt(graph.constant(multiple.coefficient().abs())), absoluteRoot(multiple.node()));
-        }
-        if (node instanceof Node.Product product) {
-            return graph.product(
-                    product.operands().stream().map(this::absoluteRoot).toList());
-        }
-        if (node instanceof Node.Power power) {
-            return graph.power(
-                    graph.call(RealFunction.ABS, power.base()), power.exponent().divide(BigFraction.TWO));
-        }
-        return graph.sqrt(graph.call(RealFunction.ABS, node));
+    /** det g. */
+    public Node determinant() {
+        return inverse().determinant();
     }
 
     /** Γ^m_mk = ½ g^ij ∂_k g_ij. */

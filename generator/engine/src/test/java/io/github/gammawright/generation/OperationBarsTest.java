@@ -41,7 +41,10 @@ class OperationBarsTest {
         assertThat(count.functions()).isEqualTo(Map.of("cos", 1, "sin", 1));
         KernelReport report = new KernelCheck(definition, CheckSettings.DEFAULT.withPoints(50))
                 .check(new KernelUnderTest(
-                        specification.qualifiedName(), generated.source(), specification.quantities(), Layout.NON_ZERO));
+                        specification.qualifiedName(),
+                        generated.source(),
+                        specification.quantities(),
+                        Layout.NON_ZERO));
         assertThat(report.verdict()).isEqualTo(KernelReport.Verdict.PASSED);
     }
 }

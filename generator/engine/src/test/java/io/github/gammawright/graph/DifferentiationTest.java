@@ -22,10 +22,12 @@ class DifferentiationTest {
         Differentiation differentiation = new Differentiation(graph);
         List<Node> gradient = differentiation.gradient(value, List.of(X, Y));
         List<Node> forward = List.of(differentiation.derivative(value, X), differentiation.derivative(value, Y));
-        StraightLineProgram program = Lowering.lower(graph, List.of(value, forward.get(0), forward.get(1), gradient.get(0), gradient.get(1)));
+        StraightLineProgram program =
+                Lowering.lower(graph, List.of(value, forward.get(0), forward.get(1), gradient.get(0), gradient.get(1)));
         double[] point = {0.375, -0.8125};
         double[] values = ProgramInterpreter.run(program, symbol -> point[symbol.index()]);
-        Gradient expected = GradientInterpreter.run(program, point)[program.outputs().get(0)];
+        Gradient expected =
+                GradientInterpreter.run(program, point)[program.outputs().get(0)];
         double scale = 1e-9 * (1 + Math.abs(expected.getValue()));
         for (int i = 0; i < 2; i++) {
             double derivative = expected.getPartialDerivative(i);

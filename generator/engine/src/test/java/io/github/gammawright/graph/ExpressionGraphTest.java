@@ -48,7 +48,8 @@ class ExpressionGraphTest {
     void halfAngles() {
         Node half = graph.multiple(BigFraction.ONE_HALF, x);
         Node cos = call(RealFunction.COS, x);
-        Node byHalf = graph.subtract(graph.one(), graph.multiple(BigFraction.TWO, square(call(RealFunction.SIN, half))));
+        Node byHalf =
+                graph.subtract(graph.one(), graph.multiple(BigFraction.TWO, square(call(RealFunction.SIN, half))));
         assertThat(byHalf).isSameAs(cos);
     }
 
@@ -82,7 +83,8 @@ class ExpressionGraphTest {
     void multiplesOfKnownValuesAreSeen() {
         Node sum = graph.add(x, y);
         graph.keep(sum);
-        Node other = graph.sum(List.of(graph.multiple(new BigFraction(-3, 7), x), graph.multiple(new BigFraction(-3, 7), y)));
+        Node other = graph.sum(
+                List.of(graph.multiple(new BigFraction(-3, 7), x), graph.multiple(new BigFraction(-3, 7), y)));
         assertThat(other).isEqualTo(graph.multiple(new BigFraction(-3, 7), sum));
     }
 
@@ -103,8 +105,8 @@ class ExpressionGraphTest {
         Node root = graph.sqrt(graph.add(square(b), graph.multiple(new BigFraction(4), square(c))));
         Node r2 = graph.multiple(BigFraction.ONE_HALF, graph.add(b, root));
         Node r = graph.sqrt(r2);
-        Node relation = graph.sum(List.of(
-                graph.power(r, 4), graph.negate(graph.multiply(b, square(r))), graph.negate(square(c))));
+        Node relation = graph.sum(
+                List.of(graph.power(r, 4), graph.negate(graph.multiply(b, square(r))), graph.negate(square(c))));
         assertThat(relation).isSameAs(graph.zero());
     }
 

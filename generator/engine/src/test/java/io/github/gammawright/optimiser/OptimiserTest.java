@@ -39,7 +39,8 @@ class OptimiserTest {
             outputs.add(nodes.next(4));
         }
         LoweredProgram start = Lowering.lowerWithValues(graph, outputs);
-        LoweredProgram better = new Optimiser(POINTS, ONE_ROUND).optimise(List.of(start)).program();
+        LoweredProgram better =
+                new Optimiser(POINTS, ONE_ROUND).optimise(List.of(start)).program();
         assertThat(modelledCost(better)).isLessThanOrEqualTo(modelledCost(start));
         for (int k = 0; k < 40; k++) {
             double shift = 0.02 * k;
@@ -91,8 +92,10 @@ class OptimiserTest {
         Node other = graph.multiply(sin, y);
         LoweredProgram start = Lowering.lowerWithValues(graph, List.of(product, graph.add(product, y), other));
         for (int seed = 0; seed < 5; seed++) {
-            StraightLineProgram program =
-                    new Optimiser(POINTS, ONE_ROUND).optimise(List.of(start)).program().program();
+            StraightLineProgram program = new Optimiser(POINTS, ONE_ROUND)
+                    .optimise(List.of(start))
+                    .program()
+                    .program();
             double[] values = ProgramInterpreter.run(program, symbol -> symbol.isParameter() ? 0 : 0.75);
             for (int output : program.outputs()) {
                 assertThat(values[output]).isFinite();
@@ -113,8 +116,10 @@ class OptimiserTest {
                 graph.power(graph.add(x, graph.constant(1)), 2), graph.power(graph.add(y, graph.constant(1)), 2));
         Node expanded = graph.subtract(squares, graph.multiple(new org.hipparchus.fraction.BigFraction(2), difference));
         LoweredProgram start = Lowering.lowerWithValues(graph, List.of(difference, sum, expanded));
-        StraightLineProgram program =
-                new Optimiser(POINTS, ONE_ROUND).optimise(List.of(start)).program().program();
+        StraightLineProgram program = new Optimiser(POINTS, ONE_ROUND)
+                .optimise(List.of(start))
+                .program()
+                .program();
         assertThat(program.count().operations()).isEqualTo(3);
     }
 }

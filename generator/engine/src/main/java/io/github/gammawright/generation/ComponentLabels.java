@@ -1,0 +1,69 @@
+package io.github.gammawright.generation;
+
+import io.github.gammawright.geometry.Quantity;
+import java.util.List;
+import java.util.stream.Collectors;
+
+/** What components are called in formulas: Γ^t_{t r} in text, {@code \Gamma^{t}_{t r}} in LaTeX. */
+final class ComponentLabels {
+
+    private final List<String> names;
+    private final Quantity quantity;
+    private final boolean latex;
+
+    ComponentLabels(List<String> coordinates, Quantity quantity, FormulaPrinter.Form form) {
+        this.quantity = quantity;
+        this.latex = form == FormulaPrinter.Form.LATEX;
+        this.names = latex ? coordinates.stream().map(LatexNames::of).toList() : coordinates;
+    }
+
+    /** The label of the component with the given indices, counted from 0. */
+    String label(int... tuple) {
+        return switch (quantity) {
+            case METRIC -> "g" + lower(tuple);
+            case INVERSE_METRIC -> "g" + upper(tuple);
+            case VOLUME_ELEMENT -> latex ? "\\sqrt{|g|}" : "√|g|";
+            case METRIC_DERIVATIVE -> partial(tuple[0]) + " g" + lower(tuple[1], tuple[2]);
+            case CHRISTOFFEL -> gamma() + upper(tuple[0]) + lower(tuple[1], tuple[2]);
+            case CHRISTOFFEL_FIRST_KIND -> gamma() + lower(tuple);
+            case CHRISTOFFEL_TRACE -> gamma() + "^m" + group("_", "m", names.get(tuple[0]));
+            case CONTRACTED_CHRISTOFFEL ->
+                "g" + group("^", "i", "j") + " " + gamma() + upper(tuple[0]) + group("_", "i", "j");
+            case GEODESIC_ACCELERATION -> rate("u" + upper(tuple[0]));
+            case HAMILTONIAN_FLOW ->
+                tuple[0] < names.size() ? rate(names.get(tuple[0])) : rate("p" + lower(tuple[0] - names.size()));
+        };
+    }
+
+    private String gamma() {
+        return latex ? "\\Gamma" : "Γ";
+    }
+
+    private String partial(int k) {
+        return (latex ? "\\partial" : "∂") + lower(k);
+    }
+
+    private String rate(String of) {
+        return latex ? "\\frac{d " + of + "}{d\\lambda}" : "d " + of + "/dλ";
+    }
+
+    private String upper(int... indices) {
+        return group("^", namesOf(indices));
+    }
+
+    private String lower(int... indices) {
+        return group("_", namesOf(indices));
+    }
+
+    private String[] namesOf(int... indices) {
+        return java.util.Arrays.stream(indices).mapToObj(names::get).toArray(String[]::new);
+    }
+
+    /** Index names without a space where each is one letter, as one writes them. */
+    private String group(String position, String... indices) {
+        boolean letters = java.util.Arrays.stream(indices).allMatch(name -> name.codePointCount(0, name.length()) == 1);
+        String joined = java.util.Arrays.stream(indices).collect(Collectors.joining(letters ? "" : " "));
+        boolean brace = latex || (indices.length > 1 && !letters);
+        return position + (brace ? "{" + joined + "}" : joined);
+    }
+}

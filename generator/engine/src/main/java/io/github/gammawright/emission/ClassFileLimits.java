@@ -1,8 +1,8 @@
 package io.github.gammawright.emission;
 
+import io.github.gammawright.diagnostic.DefinitionException;
 import io.github.gammawright.diagnostic.Diagnostic;
 import io.github.gammawright.diagnostic.DiagnosticCode;
-import io.github.gammawright.diagnostic.DefinitionException;
 import io.github.gammawright.diagnostic.SourcePosition;
 import io.github.gammawright.graph.Instruction;
 import java.util.ArrayList;

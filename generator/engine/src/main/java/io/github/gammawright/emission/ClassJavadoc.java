@@ -34,8 +34,8 @@ final class ClassJavadoc {
                         .map(result -> words(result) + " " + result.quantity().formula())
                         .toList());
         String title = definition.title().isBlank() ? "" : ": " + definition.title();
-        text.append(JavadocText.wrap(capitalised(
-                JavadocText.escape(quantities + " of the metric " + definition.name() + title) + ".")));
+        text.append(JavadocText.wrap(
+                capitalised(JavadocText.escape(quantities + " of the metric " + definition.name() + title) + ".")));
         text.append("\n\n<pre>\n");
         for (String formula : new DefinitionText(definition).formulas()) {
             text.append(JavadocText.escape(formula.replace('\n', ' '))).append('\n');

@@ -160,7 +160,8 @@ final class ConstructorMethods {
             return;
         }
         List<String> values = parameters.stream()
-                .map(p -> DoubleLiteral.of(ParameterDefaults.value(p.defaultExpression().orElseThrow())))
+                .map(p -> DoubleLiteral.of(
+                        ParameterDefaults.value(p.defaultExpression().orElseThrow())))
                 .toList();
         context.type()
                 .addMethod(MethodSpec.constructorBuilder()

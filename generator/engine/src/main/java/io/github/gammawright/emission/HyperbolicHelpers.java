@@ -54,9 +54,7 @@ final class HyperbolicHelpers {
         return method("acosh")
                 .addStatement("double y = x - 1.0")
                 .addStatement(
-                        "return x > 0x1p28 ? $1L.log(x) + $2L : $1L.log1p(y + $1L.sqrt(y * (y + 2.0)))",
-                        math,
-                        LOG_2)
+                        "return x > 0x1p28 ? $1L.log(x) + $2L : $1L.log1p(y + $1L.sqrt(y * (y + 2.0)))", math, LOG_2)
                 .build();
     }
 

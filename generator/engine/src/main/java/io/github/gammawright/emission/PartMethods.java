@@ -188,10 +188,11 @@ final class PartMethods {
         CodeBlock code() {
             CodeBlock.Builder code = CodeBlock.builder();
             boolean many = body.inlining().variables().cardinality() > MOST_NAMES;
-            IntFunction<String> names =
-                    many ? body.values().ofOneMethod() : body.values()::variable;
+            IntFunction<String> names = many ? body.values().ofOneMethod() : body.values()::variable;
             for (int value : loads) {
-                String name = body.isVariable(value) ? names.apply(value) : body.values().given(value);
+                String name = body.isVariable(value)
+                        ? names.apply(value)
+                        : body.values().given(value);
                 code.addStatement("double $L = $L", name, element(value));
             }
             JavaExpressions expressions = body.values().printer(body.inlining(), names, context.functions());
@@ -199,8 +200,7 @@ final class PartMethods {
             for (Statement statement : statements) {
                 code.add(printer.print(List.of(statement)));
                 if (statement instanceof Statement.Define define && homes.isWritten(define.value())) {
-                    code.addStatement(
-                            "$L = $L", element(define.value()), names.apply(define.value()));
+                    code.addStatement("$L = $L", element(define.value()), names.apply(define.value()));
                 }
             }
             return code.build();

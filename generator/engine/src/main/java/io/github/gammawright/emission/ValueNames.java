@@ -86,10 +86,9 @@ final class ValueNames {
     }
 
     /** A printer for a body with the given variables, which have names of their own. */
-    JavaExpressions printer(
-            Inlining inlining, IntFunction<String> variables, JavaExpressions.FunctionCalls functions) {
-        IntFunction<String> names = i ->
-                isGiven(i) ? given(i) : inlining.variables().get(i) ? variables.apply(i) : null;
+    JavaExpressions printer(Inlining inlining, IntFunction<String> variables, JavaExpressions.FunctionCalls functions) {
+        IntFunction<String> names =
+                i -> isGiven(i) ? given(i) : inlining.variables().get(i) ? variables.apply(i) : null;
         return new JavaExpressions(program, names, functions);
     }
 }

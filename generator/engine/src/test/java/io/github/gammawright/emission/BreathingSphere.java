@@ -31,10 +31,12 @@ final class BreathingSphere {
         int u = p.load(io.github.gammawright.graph.Symbol.Kind.VELOCITY, "time", 0);
         int v = p.load(io.github.gammawright.graph.Symbol.Kind.VELOCITY, "θ", 1);
         model.result(Quantity.METRIC, p.negate(p.constant(1)), slope, slope, area);
-        model.result(Quantity.GEODESIC_ACCELERATION, p.multiply(slope, p.multiply(u, v)), p.call(RealFunction.ASINH, v));
+        model.result(
+                Quantity.GEODESIC_ACCELERATION, p.multiply(slope, p.multiply(u, v)), p.call(RealFunction.ASINH, v));
         TestProgram d = model.domain;
         model.condition(d.parameter("size", 0), Comparison.GREATER, d.constant(0), "size > 0");
-        model.condition(d.function("radius", 0, 0, 0), Comparison.GREATER_OR_EQUAL, d.constant(1, 10), "radius >= 1/10");
+        model.condition(
+                d.function("radius", 0, 0, 0), Comparison.GREATER_OR_EQUAL, d.constant(1, 10), "radius >= 1/10");
         return model.build();
     }
 }

@@ -37,8 +37,8 @@ class CallerFunctionTest {
         assertThat(method.getName()).isEqualTo("radius");
         assertThat(method.getParameterTypes()).containsExactly(double.class, double.class, double[].class);
         assertThat(KernelEmitter.functions(BreathingSphere.model()))
-                .containsExactly(new EmittedFunction(
-                        "radius", "radius", List.of(List.of(0, 0), List.of(1, 0), List.of(1, 1))));
+                .containsExactly(
+                        new EmittedFunction("radius", "radius", List.of(List.of(0, 0), List.of(1, 0), List.of(1, 1))));
     }
 
     @Test
@@ -72,8 +72,10 @@ class CallerFunctionTest {
 
     @Test
     void domainCallsTheFunctionToo() {
-        assertThat(kernel.call(kernel(), "inDomain", (Object) new double[] {0.5, 0.25})).isEqualTo(true);
-        assertThat(kernel.call(kernel(), "inDomain", (Object) new double[] {-0.5, 0.25})).isEqualTo(false);
+        assertThat(kernel.call(kernel(), "inDomain", (Object) new double[] {0.5, 0.25}))
+                .isEqualTo(true);
+        assertThat(kernel.call(kernel(), "inDomain", (Object) new double[] {-0.5, 0.25}))
+                .isEqualTo(false);
     }
 
     @Test

@@ -26,9 +26,7 @@ final class CompiledKernel {
 
     static CompiledKernel of(KernelModel model) {
         String source = KernelEmitter.emit(model);
-        String name = model.packageName().isEmpty()
-                ? model.className()
-                : model.packageName() + "." + model.className();
+        String name = model.packageName().isEmpty() ? model.className() : model.packageName() + "." + model.className();
         CompiledClasses classes = InMemoryCompiler.ofThisJdk().compile(name, source);
         assertThat(classes.warnings()).isEmpty();
         for (MethodSize size : classes.methodSizes()) {

@@ -42,6 +42,8 @@ class GoldenSourceTest {
     @ParameterizedTest(name = "{0}")
     @MethodSource("models")
     void sourceIsTheSameEachTime(String name, KernelModel model) {
-        assertThat(KernelEmitter.emit(model)).isEqualTo(KernelEmitter.emit(model)).doesNotContain("\r");
+        assertThat(KernelEmitter.emit(model))
+                .isEqualTo(KernelEmitter.emit(model))
+                .doesNotContain("\r");
     }
 }

@@ -17,8 +17,22 @@ import org.junit.jupiter.params.provider.ValueSource;
 class HostileNamesTest {
 
     private static final List<String> NAMES = List.of(
-            "E", "I", "N", "D", "class", "double", "at", "point", "Math", "String", "christoffel", "t1", "this", "_",
-            "λ", "µ");
+            "E",
+            "I",
+            "N",
+            "D",
+            "class",
+            "double",
+            "at",
+            "point",
+            "Math",
+            "String",
+            "christoffel",
+            "t1",
+            "this",
+            "_",
+            "λ",
+            "µ");
 
     private static final String COMMENT = "*/ class X { } /* {@code <b>&amp; @param x \\u002a/ \\u000a \u202e $L $S";
 
@@ -27,8 +41,26 @@ class HostileNamesTest {
         TestModel model = new TestModel();
         model.coordinates = NAMES;
         List<String> parameters = List.of(
-                "evaluate", "index", "LENGTH", "serialVersionUID", "null", "var", "point_", "at_", "java", "Object",
-                "from", "results", "length", "𝛼", "ⅷ", "workspace", "functions", "inverseE", "E2", "sinE");
+                "evaluate",
+                "index",
+                "LENGTH",
+                "serialVersionUID",
+                "null",
+                "var",
+                "point_",
+                "at_",
+                "java",
+                "Object",
+                "from",
+                "results",
+                "length",
+                "𝛼",
+                "ⅷ",
+                "workspace",
+                "functions",
+                "inverseE",
+                "E2",
+                "sinE");
         TestProgram p = model.program;
         int sum = p.coordinate(NAMES.get(0), 0);
         for (int i = 1; i < NAMES.size(); i++) {
@@ -54,8 +86,16 @@ class HostileNamesTest {
     @ParameterizedTest
     @ValueSource(
             strings = {
-                "Math", "String", "Arrays", "Objects", "Object", "Serializable", "Functions", "SuppressWarnings",
-                "IllegalArgumentException", "Σ"
+                "Math",
+                "String",
+                "Arrays",
+                "Objects",
+                "Object",
+                "Serializable",
+                "Functions",
+                "SuppressWarnings",
+                "IllegalArgumentException",
+                "Σ"
             })
     void classesMayHaveTheNamesOfThoseTheyUse(String className) {
         TestModel model = new TestModel();
@@ -67,8 +107,7 @@ class HostileNamesTest {
         int root = p.call(io.github.gammawright.graph.RealFunction.SQRT, x);
         int f = p.call(io.github.gammawright.graph.RealFunction.ACOSH, p.function("f", 0, 0, 0));
         model.result(Quantity.METRIC, root, f, f, p.pi());
-        model.condition(
-                model.domain.parameter("a", 0), MetricDefinition.Comparison.LESS, model.domain.pi(), "a < pi");
+        model.condition(model.domain.parameter("a", 0), MetricDefinition.Comparison.LESS, model.domain.pi(), "a < pi");
         assertThat(CompiledKernel.of(model.build()).type.getSimpleName()).isEqualTo(className);
     }
 
@@ -82,8 +121,8 @@ class HostileNamesTest {
         model.form = new MetricForm.LineElement(new Expression.Name(COMMENT, TestModel.NOWHERE));
         model.abbreviations.add(new MetricDefinition.Abbreviation(
                 COMMENT, new Expression.Name("*", TestModel.NOWHERE), TestModel.NOWHERE));
-        model.parameters.add(new MetricDefinition.Parameter(
-                "a", Optional.empty(), COMMENT, "*/ \ud800 \u0000", TestModel.NOWHERE));
+        model.parameters.add(
+                new MetricDefinition.Parameter("a", Optional.empty(), COMMENT, "*/ \ud800 \u0000", TestModel.NOWHERE));
         model.condition(
                 model.domain.parameter("a", 0), MetricDefinition.Comparison.LESS, model.domain.pi(), "\"" + COMMENT);
         model.result(Quantity.METRIC, model.program.coordinate("x", 0));

@@ -32,8 +32,9 @@ class KernelEmitterTest {
         CompiledKernel kernel = CompiledKernel.of(model);
         double[] values = Schwarzschild.values(model.program(), 1.25, POINT);
         List<Integer> slots = model.results().get(0).slots();
-        double[] expected =
-                slots.stream().mapToDouble(slot -> slot < 0 ? 0.0 : values[slot]).toArray();
+        double[] expected = slots.stream()
+                .mapToDouble(slot -> slot < 0 ? 0.0 : values[slot])
+                .toArray();
         assertThat(kernel.constant("LENGTH")).isEqualTo(expected.length);
         Object created = kernel.create(1.25);
         assertThat((double[]) kernel.call(created, "valuesAt", (Object) POINT)).isEqualTo(expected);
@@ -56,7 +57,8 @@ class KernelEmitterTest {
     void indexFindsEveryComponent(Layout layout) {
         KernelModel model = Schwarzschild.christoffel(layout);
         CompiledKernel kernel = CompiledKernel.of(model);
-        List<Integer> full = Schwarzschild.christoffel(Layout.FULL).results().get(0).slots();
+        List<Integer> full =
+                Schwarzschild.christoffel(Layout.FULL).results().get(0).slots();
         List<Integer> slots = model.results().get(0).slots();
         for (int k = 0; k < 4; k++) {
             for (int i = 0; i < 4; i++) {
@@ -64,9 +66,8 @@ class KernelEmitterTest {
                     int index = (int) kernel.call(null, "index", k, i, j);
                     int wanted = full.get((k * 4 + i) * 4 + j);
                     assertThat(index < 0 ? -1 : slots.get(index)).isEqualTo(wanted);
-                    assertThat(kernel.call(null, "index", k, j, i)).isEqualTo(layout == Layout.FULL
-                            ? (k * 4 + j) * 4 + i
-                            : index);
+                    assertThat(kernel.call(null, "index", k, j, i))
+                            .isEqualTo(layout == Layout.FULL ? (k * 4 + j) * 4 + i : index);
                 }
             }
         }
@@ -87,9 +88,7 @@ class KernelEmitterTest {
     @Test
     void evaluateExistsOnce() {
         CompiledKernel kernel = CompiledKernel.of(Schwarzschild.christoffel(Layout.FULL));
-        assertThat(Arrays.stream(kernel.type.getMethods())
-                        .map(Method::getName)
-                        .filter("evaluate"::equals))
+        assertThat(Arrays.stream(kernel.type.getMethods()).map(Method::getName).filter("evaluate"::equals))
                 .hasSize(1);
     }
 
@@ -166,7 +165,9 @@ class KernelEmitterTest {
         assertThat(kernel.call(copy, "valuesAt", (Object) POINT))
                 .isEqualTo(kernel.call(created, "valuesAt", (Object) POINT));
         for (Field field : kernel.type.getDeclaredFields()) {
-            assertThat(Modifier.isFinal(field.getModifiers())).as(field.toString()).isTrue();
+            assertThat(Modifier.isFinal(field.getModifiers()))
+                    .as(field.toString())
+                    .isTrue();
         }
     }
 
@@ -203,9 +204,11 @@ class KernelEmitterTest {
         model.result(Quantity.METRIC, model.program.coordinate("x", 0));
         long version = new DefinitionText(model.build().definition()).serialVersion();
         model.title = "another title";
-        assertThat(new DefinitionText(model.build().definition()).serialVersion()).isEqualTo(version);
+        assertThat(new DefinitionText(model.build().definition()).serialVersion())
+                .isEqualTo(version);
         model.parameter("b", null);
-        assertThat(new DefinitionText(model.build().definition()).serialVersion()).isNotEqualTo(version);
+        assertThat(new DefinitionText(model.build().definition()).serialVersion())
+                .isNotEqualTo(version);
     }
 
     @Test

@@ -3,7 +3,6 @@ package io.github.gammawright.emission;
 import com.palantir.javapoet.CodeBlock;
 import com.palantir.javapoet.MethodSpec;
 import io.github.gammawright.definition.MetricDefinition;
-import io.github.gammawright.definition.ParameterDefaults;
 import java.util.ArrayList;
 import java.util.BitSet;
 import java.util.List;
@@ -160,8 +159,7 @@ final class ConstructorMethods {
             return;
         }
         List<String> values = parameters.stream()
-                .map(p -> DoubleLiteral.of(
-                        ParameterDefaults.value(p.defaultExpression().orElseThrow())))
+                .map(p -> DoubleLiteral.of(DefaultValue.of(p.defaultExpression().orElseThrow())))
                 .toList();
         context.type()
                 .addMethod(MethodSpec.constructorBuilder()

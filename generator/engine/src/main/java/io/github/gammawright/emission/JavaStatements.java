@@ -3,21 +3,20 @@ package io.github.gammawright.emission;
 import com.palantir.javapoet.CodeBlock;
 import java.util.Arrays;
 import java.util.List;
-import java.util.function.IntFunction;
 
 /** Writes statements as Java. */
 final class JavaStatements {
 
-    /** Zeros in a row from this many on are written by one call; up to it, single stores were measured faster. */
-    static final int LONG_RUN = 33;
+    /** Zeros in a row from this many on are written by one call. */
+    static final int LONG_RUN = 9;
 
     private final JavaExpressions expressions;
-    private final IntFunction<String> variables;
+    private final ValueNames names;
     private final List<ArrayTarget> arrays;
 
-    JavaStatements(JavaExpressions expressions, IntFunction<String> variables, List<ArrayTarget> arrays) {
+    JavaStatements(JavaExpressions expressions, ValueNames names, List<ArrayTarget> arrays) {
         this.expressions = expressions;
-        this.variables = variables;
+        this.names = names;
         this.arrays = List.copyOf(arrays);
     }
 
@@ -31,7 +30,7 @@ final class JavaStatements {
 
     private void print(Statement statement, CodeBlock.Builder code) {
         if (statement instanceof Statement.Define define) {
-            String name = variables.apply(define.value());
+            String name = names.variable(define.value());
             add(code, "double " + name + " = " + expressions.definition(define.value()));
         } else if (statement instanceof Statement.Store store) {
             String target = arrays.get(store.array()).element(store.slot());

@@ -44,7 +44,7 @@ public record BuildPlan(List<Part> parts) {
     public static BuildPlan of(List<MetricDefinition> definitions, BuildSettings settings) {
         List<Part> parts = new ArrayList<>();
         List<Diagnostic> wrong = new ArrayList<>();
-        ClassNames taken = new ClassNames();
+        TakenNames taken = new TakenNames();
         for (MetricDefinition definition : definitions) {
             Diagnostics diagnostics = new Diagnostics(definition.source());
             List<KernelSpecification> kernels = new ArrayList<>();
@@ -59,16 +59,6 @@ public record BuildPlan(List<Part> parts) {
             throw new DefinitionException(wrong);
         }
         return new BuildPlan(parts);
-    }
-
-    /** The start of the class names of a definition: {@code lantern-star} gives {@code LanternStar}. */
-    public static String classPrefix(MetricDefinition definition) {
-        StringBuilder prefix = new StringBuilder();
-        for (String word : definition.name().split("-")) {
-            prefix.appendCodePoint(Character.toUpperCase(word.codePointAt(0)))
-                    .append(word, Character.charCount(word.codePointAt(0)), word.length());
-        }
-        return prefix.toString();
     }
 
     private static List<Planned> plan(MetricDefinition definition, BuildSettings settings, Diagnostics diagnostics) {

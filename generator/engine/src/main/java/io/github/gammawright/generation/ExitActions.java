@@ -1,35 +1,35 @@
 package io.github.gammawright.generation;
 
-/** What is to be done if the JVM is told to end in the middle of something. */
+/** What is to be done if the program is told to end in the middle of something. */
 public interface ExitActions {
 
     /**
-     * Has the action run if the JVM ends before it is removed.
+     * Has the action run if the program is told to end before the action is withdrawn.
      *
-     * @throws IllegalStateException if the JVM is ending already
+     * @throws IllegalStateException if the program is ending already
      */
-    void add(Thread action);
+    Registration add(Runnable action);
 
-    /** Forgets an action that was added; does nothing if the JVM is ending already. */
-    void remove(Thread action);
+    /** An action that was added. */
+    interface Registration {
 
-    /** Shutdown hooks of the JVM. */
+        /** Forgets the action; does nothing if the program is ending already. */
+        void withdraw();
+    }
+
+    /** The actions of a program that has no other way to end than that of its JVM: shutdown hooks. */
     static ExitActions ofJvm() {
-        return new ExitActions() {
-            @Override
-            public void add(Thread action) {
-                Runtime.getRuntime().addShutdownHook(action);
-            }
-
-            @Override
-            public void remove(Thread action) {
+        return action -> {
+            Thread hook = new Thread(action, "gammawright-exit");
+            Runtime.getRuntime().addShutdownHook(hook);
+            return () -> {
                 try {
-                    Runtime.getRuntime().removeShutdownHook(action);
+                    Runtime.getRuntime().removeShutdownHook(hook);
                 } catch (IllegalStateException e) {
                     // The JVM is ending, and runs it.
                     return;
                 }
-            }
+            };
         };
     }
 }

@@ -1,15 +1,12 @@
 package io.github.gammawright.generation;
 
+import io.github.gammawright.definition.ClassNames;
+import io.github.gammawright.diagnostic.VisibleText;
 import java.nio.charset.StandardCharsets;
 import java.util.Optional;
-import java.util.Set;
-import javax.lang.model.SourceVersion;
 
-/** Names for packages and classes as a compiler, a file system and a reader want them. */
+/** Names for packages and classes that come from a command line or a configuration. */
 final class JavaNames {
-
-    /** Not keywords, but no class may be called so: Java Language Specification 17, section 3.9. */
-    private static final Set<String> NO_CLASS = Set.of("permits", "record", "sealed", "var", "yield");
 
     /** File systems allow 255 bytes; a nested class and {@code .class} need some of them. */
     private static final int LONGEST = 200;
@@ -18,10 +15,10 @@ final class JavaNames {
 
     /** What is wrong with a class name, if anything. */
     static Optional<String> complaintAboutClass(String name) {
-        if (!SourceVersion.isIdentifier(name) || isReserved(name)) {
-            return Optional.of("'" + name + "' is not the name of a Java class");
+        if (!ClassNames.isClassName(name)) {
+            return complaint(name, "is not a name for a class");
         }
-        return complaintAboutPart(name);
+        return isTooLong(name) ? complaint(name, "is too long for the name of a file") : Optional.empty();
     }
 
     /** What is wrong with a package name, if anything; empty means the unnamed package. */
@@ -29,31 +26,25 @@ final class JavaNames {
         if (name.isEmpty()) {
             return Optional.empty();
         }
-        for (String part : name.split("\\.", -1)) {
-            if (!SourceVersion.isIdentifier(part) || SourceVersion.isKeyword(part, SourceVersion.RELEASE_17)) {
-                return Optional.of("'" + name + "' is not the name of a Java package");
-            }
-            Optional<String> complaint = complaintAboutPart(part);
-            if (complaint.isPresent()) {
-                return complaint;
+        if (!ClassNames.isPackageName(name)) {
+            return complaint(name, "is not a name for a package");
+        }
+        if (name.equals("java") || name.startsWith("java.")) {
+            return complaint(name, "is a package that only Java itself may have");
+        }
+        for (String part : name.split("\\.")) {
+            if (isTooLong(part)) {
+                return complaint(part, "is too long for the name of a folder");
             }
         }
-        return name.equals("java") || name.startsWith("java.")
-                ? Optional.of("'" + name + "' belongs to Java itself; choose another package")
-                : Optional.empty();
+        return Optional.empty();
     }
 
-    private static boolean isReserved(String name) {
-        return SourceVersion.isKeyword(name, SourceVersion.RELEASE_17) || NO_CLASS.contains(name);
+    private static boolean isTooLong(String name) {
+        return name.getBytes(StandardCharsets.UTF_8).length > LONGEST;
     }
 
-    private static Optional<String> complaintAboutPart(String name) {
-        // Invisible, and dropped by compilers: two names that look alike, or one that is no file's.
-        if (name.codePoints().anyMatch(Character::isIdentifierIgnorable)) {
-            return Optional.of("a Java name holds an invisible character");
-        }
-        return name.getBytes(StandardCharsets.UTF_8).length > LONGEST
-                ? Optional.of("'" + name.substring(0, 40) + "…' is too long for the name of a file")
-                : Optional.empty();
+    private static Optional<String> complaint(String name, String what) {
+        return Optional.of("'" + VisibleText.of(name) + "' " + what);
     }
 }

@@ -1,5 +1,6 @@
 package io.github.gammawright.generation;
 
+import io.github.gammawright.definition.ClassNames;
 import io.github.gammawright.definition.MetricDefinition;
 import io.github.gammawright.diagnostic.SourcePosition;
 import io.github.gammawright.geometry.Layout;
@@ -24,7 +25,7 @@ record Planned(KernelSpecification specification, SourcePosition position) {
                     new KernelSpecification(packageName, className.get(), quantities, layout, options);
             return List.of(new Planned(all, position));
         }
-        String prefix = BuildPlan.classPrefix(definition);
+        String prefix = ClassNames.prefix(definition.name());
         return quantities.stream()
                 .map(quantity -> new KernelSpecification(
                         packageName, prefix + quantity.classSuffix(), List.of(quantity), layout, options))

@@ -27,13 +27,11 @@ final class TemporaryFiles implements AutoCloseable {
 
     private final Deque<Staged> waiting = new ArrayDeque<>();
     private final Set<Path> tidied = new HashSet<>();
-    private final Thread tidy = new Thread(this::removeWaiting, "gammawright-tidy");
-    private final ExitActions exit;
+    private final ExitActions.Registration tidyOnExit;
 
     TemporaryFiles(ExitActions exit) throws OutputException {
-        this.exit = exit;
         try {
-            exit.add(tidy);
+            tidyOnExit = exit.add(this::removeWaiting);
         } catch (IllegalStateException e) {
             throw new OutputException("interrupted before anything was written", e);
         }
@@ -74,7 +72,7 @@ final class TemporaryFiles implements AutoCloseable {
     @Override
     public void close() {
         removeWaiting();
-        exit.remove(tidy);
+        tidyOnExit.withdraw();
     }
 
     private synchronized void removeWaiting() {

@@ -145,16 +145,9 @@ class SourceWriterTest {
     @Test
     void tidiesUpWhenTheProgramIsInterrupted() throws IOException {
         List<Runnable> actions = new ArrayList<>();
-        ExitActions exit = new ExitActions() {
-            @Override
-            public void add(Thread action) {
-                actions.add(action);
-            }
-
-            @Override
-            public void remove(Thread action) {
-                actions.remove(action);
-            }
+        ExitActions exit = action -> {
+            actions.add(action);
+            return () -> actions.remove(action);
         };
         try (TemporaryFiles files = new TemporaryFiles(exit)) {
             files.stage(temporary.resolve("Star.java"), new byte[] {1});

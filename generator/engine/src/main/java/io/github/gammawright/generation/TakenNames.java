@@ -8,7 +8,7 @@ import java.util.Locale;
 import java.util.Map;
 
 /** The classes planned so far; no two may have one name, nor names that some file systems cannot tell apart. */
-final class ClassNames {
+final class TakenNames {
 
     private final Map<String, Claim> taken = new HashMap<>();
 
@@ -19,9 +19,7 @@ final class ClassNames {
         if (earlier == null) {
             return;
         }
-        String by = earlier.definition().equals(definition)
-                ? "this definition"
-                : earlier.definition().source().name();
+        String by = earlier.definition().source().name();
         if (earlier.name().equals(name)) {
             diagnostics.report(DiagnosticCode.CLASS_DUPLICATE, planned.position(), name, by);
         } else {

@@ -45,7 +45,8 @@ class CheckCommandTest {
 
     @Test
     void reportsAsJson() {
-        Program run = Program.run("check", "polar-plane", "--points", "8", "--seed", "7", "--effort", "quick", "--json");
+        Program run =
+                Program.run("check", "polar-plane", "--points", "8", "--seed", "7", "--effort", "quick", "--json");
 
         assertThat(run.output().strip()).startsWith("{").endsWith("}");
         assertThat(run.output())

@@ -222,7 +222,8 @@ class GenerateCommandTest {
     }
 
     private Program generate(String... arguments) {
-        return Program.run(Stream.of(List.of("generate", "--effort", "quick"), List.of(arguments), List.of("--out", out.toString()))
+        return Program.run(Stream.of(
+                        List.of("generate", "--effort", "quick"), List.of(arguments), List.of("--out", out.toString()))
                 .flatMap(List::stream)
                 .toArray(String[]::new));
     }

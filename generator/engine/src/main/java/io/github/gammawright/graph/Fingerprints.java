@@ -84,6 +84,12 @@ final class Fingerprints {
                     values.get(node.id())[k] = value(node, k);
                     break;
                 } catch (UnsuitablePoint e) {
+                    if (!node.operands().isEmpty()
+                            && node.operands().get(0) instanceof Node.Constant
+                            && opaque.add(node.id())) {
+                        // the root of a number: no other point would help
+                        continue;
+                    }
                     redraws++;
                     if (redraws > REDRAWS) {
                         // the relations of this root stay unseen from here on; nothing becomes wrong
@@ -144,6 +150,9 @@ final class Fingerprints {
         }
         if (node instanceof Node.ParameterPower power) {
             long base = at(power.base(), k);
+            if (opaque.contains(power.id())) {
+                return oracle(P, k, 10, base, exponentValue(power.exponent(), k));
+            }
             requireSquare(base);
             return P.power(base, exponentValue(power.exponent(), k));
         }

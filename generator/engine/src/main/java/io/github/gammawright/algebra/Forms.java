@@ -143,8 +143,8 @@ final class Forms {
             if (!(conversion.generators().all().get(i) instanceof Generator.Paired)) {
                 continue;
             }
-            for (Map.Entry<GenPolynomial<BigInteger>, Integer> entry : List.copyOf(product.exponents.entrySet())) {
-                GenPolynomial<BigInteger> factor = entry.getKey();
+            for (GenPolynomial<BigInteger> factor : List.copyOf(product.exponents.keySet())) {
+                int exponent = product.exponentOf(factor);
                 if (!Polynomials.contains(factor, i) || factor.length() < 2) {
                     continue;
                 }
@@ -153,8 +153,8 @@ final class Forms {
                                 .mapToInt(Integer::intValue)
                                 .sum()
                         > 1) {
-                    product.multiplyBy(factor, -entry.getValue());
-                    multiplyByFactors(product, other, entry.getValue());
+                    product.multiplyBy(factor, -exponent);
+                    multiplyByFactors(product, other, exponent);
                 }
             }
         }

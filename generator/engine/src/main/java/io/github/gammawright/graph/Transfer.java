@@ -57,6 +57,9 @@ public final class Transfer {
                 if (!copies.containsKey(top)) {
                     Node copy = make(top);
                     copies.put(top, copy);
+                    if (source.isKept(top)) {
+                        target.keep(copy);
+                    }
                     source.nameOf(top).ifPresent(name -> target.name(copy, name));
                 }
             }

@@ -20,6 +20,7 @@ public final class Lowering {
     private final ProgramBuilder program = new ProgramBuilder();
     private final Map<Node, Signed> lowered = new HashMap<>();
     private final Map<Node, Integer> reciprocalUses = new HashMap<>();
+    private final Map<Node, Signed> reciprocals = new HashMap<>();
     private final Map<Integer, Node> atoms = new HashMap<>();
 
     private Lowering(ExpressionGraph graph) {
@@ -236,6 +237,18 @@ public final class Lowering {
         return known;
     }
 
+    private Signed reciprocal(Node base) {
+        Node inverse = graph.reciprocal(base);
+        if (inverse instanceof Node.Power power && power.base() == base) {
+            return power(power);
+        }
+        // the graph knows the reciprocal in another form, which may be computed from what is being computed here
+        return reciprocals.computeIfAbsent(base, b -> {
+            Signed divisor = lower(b);
+            return new Signed(program.divide(program.constant(BigFraction.ONE), divisor.number()), divisor.negative());
+        });
+    }
+
     private Signed computePower(Node.Power power) {
         BigFraction exponent = power.exponent();
         BigInteger denominator = exponent.getDenominator();
@@ -246,8 +259,7 @@ public final class Lowering {
                 return new Signed(program.divide(program.constant(BigFraction.ONE), base.number()), base.negative());
             }
             if (denominator.equals(BigInteger.ONE)) {
-                Signed inverse = lower(graph.reciprocal(power.base()));
-                return whole(inverse, numerator.negate());
+                return whole(reciprocal(power.base()), numerator.negate());
             }
             // x^(−m/n) is the reciprocal of x^(m/n), which is likely to be there
             Signed positive = lower(graph.power(power.base(), exponent.negate()));

@@ -8,11 +8,15 @@ package io.github.gammawright.graph;
  */
 public final class PrimeField {
 
-    /** p = 2^61 − 2373, a safe prime with p ≡ 3 (mod 4). */
-    public static final PrimeField VALUES = new PrimeField(61, 2373);
+    /**
+     * p = 2^61 − 636873, the largest safe prime below 2^61 modulo which all primes up to 37 are squares: the roots of
+     * most numbers that metrics contain, such as √2 and √3, have values there and satisfy all their relations. As any
+     * safe prime it is ≡ 3 (mod 4).
+     */
+    public static final PrimeField VALUES = new PrimeField(61, 636_873);
 
-    /** q = (p − 1)/2 = 2^60 − 1187, the order of the group of squares modulo p. */
-    static final PrimeField EXPONENTS = new PrimeField(60, 1187);
+    /** q = (p − 1)/2 = 2^60 − 318437, the order of the group of squares modulo p. */
+    static final PrimeField EXPONENTS = new PrimeField(60, 318_437);
 
     private final int bits;
     private final long offset;

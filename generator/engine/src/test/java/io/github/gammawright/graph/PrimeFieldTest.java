@@ -12,8 +12,8 @@ import org.junit.jupiter.api.Test;
 /** The fields are checked against {@link BigInteger}, a general-purpose reference. */
 class PrimeFieldTest {
 
-    private static final long P = (1L << 61) - 2373;
-    private static final long Q = (1L << 60) - 1187;
+    private static final long P = (1L << 61) - 636_873;
+    private static final long Q = (1L << 60) - 318_437;
 
     @Test
     void theModuliAreASafePrimeAndItsHalf() {
@@ -22,6 +22,13 @@ class PrimeFieldTest {
         assertThat(BigInteger.valueOf(P).isProbablePrime(100)).isTrue();
         assertThat(BigInteger.valueOf(Q).isProbablePrime(100)).isTrue();
         assertThat(P % 4).isEqualTo(3);
+    }
+
+    @Test
+    void smallPrimesAreSquares() {
+        for (long prime : new long[] {2, 3, 5, 7, 11, 13, 17, 19, 23, 29, 31, 37}) {
+            assertThat(PrimeField.VALUES.isSquare(prime)).as("%d", prime).isTrue();
+        }
     }
 
     @Property

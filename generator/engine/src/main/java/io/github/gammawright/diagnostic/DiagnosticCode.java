@@ -179,6 +179,8 @@ public enum DiagnosticCode {
             "the class {0} differs only in case from {1}, made by {2}, and some file systems cannot tell them apart",
             "Give it another name with 'class' in a [[kernel]] table, or another package."),
 
+    KERNEL_TOO_LARGE(Subject.NOTHING, "the class {0} would need {1}, more than a class file can hold", ""),
+
     TOO_MANY_MISTAKES(Subject.NOTHING, "{0} more mistakes are not shown", "Mend the first {1} and run again.");
 
     private enum Subject {

@@ -63,7 +63,7 @@ final class BodyMethods {
         List<List<Statement>> parts = Partition.of(body, new BytecodeSize(body));
         if (parts.size() == 1) {
             JavaExpressions printer = context.values().printer(inlining, context.functions());
-            return new JavaStatements(printer, context.values(), body.arrays()).print(body.statements());
+            return new JavaStatements(printer, context.values()::variable, body.arrays()).print(body.statements());
         }
         body = body.withZerosLast();
         parts = Partition.of(body, new BytecodeSize(body));

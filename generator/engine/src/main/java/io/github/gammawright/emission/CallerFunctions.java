@@ -54,6 +54,16 @@ final class CallerFunctions {
         return orders.stream().mapToInt(Integer::intValue).sum();
     }
 
+    /** How the class asks for each function. */
+    List<EmittedFunction> described() {
+        List<EmittedFunction> described = new ArrayList<>();
+        for (int f = 0; f < functions.size(); f++) {
+            described.add(new EmittedFunction(
+                    functions.get(f).name(), context.names().functions().get(f), orders.get(f)));
+        }
+        return described;
+    }
+
     boolean exist() {
         return !functions.isEmpty();
     }

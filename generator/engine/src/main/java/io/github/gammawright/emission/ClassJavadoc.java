@@ -28,14 +28,14 @@ final class ClassJavadoc {
     }
 
     private void metric() {
-        String title = definition.title().isBlank() ? "the metric " + definition.name() : definition.title();
         String quantities = String.join(
                 ", ",
                 context.model().results().stream()
-                        .map(result -> words(result) + " (" + result.quantity().formula() + ")")
+                        .map(result -> words(result) + " " + result.quantity().formula())
                         .toList());
+        String title = definition.title().isBlank() ? "" : ": " + definition.title();
         text.append(JavadocText.wrap(
-                capitalised(JavadocText.escape(quantities)) + " of " + JavadocText.escape(title) + "."));
+                capitalised(JavadocText.escape(quantities + " of the metric " + definition.name() + title) + ".")));
         text.append("\n\n<pre>\n");
         for (String formula : new DefinitionText(definition).formulas()) {
             text.append(JavadocText.escape(formula.replace('\n', ' '))).append('\n');

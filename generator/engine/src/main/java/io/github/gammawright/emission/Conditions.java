@@ -82,7 +82,10 @@ final class Conditions {
         for (int i = behind.nextSetBit(0); i >= 0; i = behind.nextSetBit(i + 1)) {
             if (program.instruction(i) instanceof Instruction.Load load) {
                 String separator = values.isEmpty() ? "" : ", ";
-                values.add(CodeBlock.of("\n+ $S + $L", separator + load.symbol().name() + " = ", parameter.apply(i)));
+                values.add(CodeBlock.of(
+                        "\n+ $L + $L",
+                        StringLiteral.of(separator + load.symbol().name() + " = "),
+                        parameter.apply(i)));
             }
         }
         String text = "the parameters do not meet the condition " + condition.text();
@@ -90,7 +93,7 @@ final class Conditions {
         code.add("if ($L) {\n", LineBreaks.wrap("!(" + comparisons(condition, operand) + ")"))
                 .indent();
         code.add("throw new $T(", IllegalArgumentException.class).indent().indent();
-        code.add("$S", values.isEmpty() ? text : text + ": ");
+        code.add("$L", StringLiteral.of(values.isEmpty() ? text : text + ": "));
         values.forEach(code::add);
         code.add(");\n").unindent().unindent().unindent();
         return code.add("}\n").build();

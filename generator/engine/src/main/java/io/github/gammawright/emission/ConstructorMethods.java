@@ -3,6 +3,7 @@ package io.github.gammawright.emission;
 import com.palantir.javapoet.CodeBlock;
 import com.palantir.javapoet.MethodSpec;
 import io.github.gammawright.definition.MetricDefinition;
+import io.github.gammawright.definition.ParameterDefaults;
 import java.util.ArrayList;
 import java.util.BitSet;
 import java.util.List;
@@ -159,7 +160,8 @@ final class ConstructorMethods {
             return;
         }
         List<String> values = parameters.stream()
-                .map(p -> DoubleLiteral.of(DefaultValue.of(p.defaultExpression().orElseThrow())))
+                .map(p -> DoubleLiteral.of(
+                        ParameterDefaults.value(p.defaultExpression().orElseThrow())))
                 .toList();
         context.type()
                 .addMethod(MethodSpec.constructorBuilder()

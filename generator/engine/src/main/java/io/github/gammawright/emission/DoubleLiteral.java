@@ -1,30 +1,12 @@
 package io.github.gammawright.emission;
 
 import java.math.BigDecimal;
-import java.math.BigInteger;
 import java.math.MathContext;
-import org.hipparchus.fraction.BigFraction;
 
-/** Rounds exact numbers to doubles and writes doubles as Java literals. */
+/** Writes doubles as Java literals. */
 final class DoubleLiteral {
 
-    /** More than the digits of any point half-way between two doubles. */
-    private static final MathContext ENOUGH = new MathContext(1200);
-
     private DoubleLiteral() {}
-
-    /** The double nearest to a rational number, ties to even. */
-    static double nearest(BigFraction value) {
-        BigInteger numerator = value.getNumerator();
-        BigInteger denominator = value.getDenominator();
-        if (numerator.bitLength() <= 53 && denominator.bitLength() <= 53) {
-            // both exact, so that the one rounding is the division's
-            return numerator.doubleValue() / denominator.doubleValue();
-        }
-        return new BigDecimal(numerator)
-                .divide(new BigDecimal(denominator), ENOUGH)
-                .doubleValue();
-    }
 
     /**
      * The shortest literal that denotes the value. {@code Double.toString} is not used, since what it gives differs

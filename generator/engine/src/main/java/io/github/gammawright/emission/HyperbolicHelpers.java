@@ -10,6 +10,8 @@ import javax.lang.model.element.Modifier;
  */
 final class HyperbolicHelpers {
 
+    private static final String LOG_2 = "0.6931471805599453";
+
     private final EmissionContext context;
 
     HyperbolicHelpers(EmissionContext context) {
@@ -40,10 +42,8 @@ final class HyperbolicHelpers {
         String math = context.functions().math();
         return method("asinh")
                 .addStatement("double a = $L.abs(x)", math)
-                .addStatement(
-                        "double y = a > 0x1p28 ? $1L.log(a) + $2L : $1L.log1p(a + a * a / (1.0 + $1L.sqrt(1.0 + a * a)))",
-                        math,
-                        "0.6931471805599453")
+                .addStatement("double y = a * a / (1.0 + $1L.sqrt(1.0 + a * a))", math)
+                .addStatement("y = a > 0x1p28 ? $1L.log(a) + $2L : $1L.log1p(a + y)", math, LOG_2)
                 .addStatement("return $L.copySign(y, x)", math)
                 .build();
     }
@@ -54,9 +54,7 @@ final class HyperbolicHelpers {
         return method("acosh")
                 .addStatement("double y = x - 1.0")
                 .addStatement(
-                        "return x > 0x1p28 ? $1L.log(x) + $2L : $1L.log1p(y + $1L.sqrt(y * (y + 2.0)))",
-                        math,
-                        "0.6931471805599453")
+                        "return x > 0x1p28 ? $1L.log(x) + $2L : $1L.log1p(y + $1L.sqrt(y * (y + 2.0)))", math, LOG_2)
                 .build();
     }
 

@@ -65,12 +65,14 @@ final class IndexMethods {
         List<String> indices = names(shape.rank());
         indices.forEach(index -> method.addParameter(int.class, index));
         method.addCode(position(shape, indices, context.model().layout() != Layout.FULL));
-        if (context.model().layout() == Layout.NON_ZERO) {
+        if (isLookedUp()) {
             lookUp(result, method);
-        } else {
-            method.addStatement("return position");
         }
         context.type().addMethod(method.build());
+    }
+
+    private boolean isLookedUp() {
+        return context.model().layout() == Layout.NON_ZERO;
     }
 
     private static List<String> names(int rank) {
@@ -120,7 +122,8 @@ final class IndexMethods {
                     rows == 0 ? "" : (rows == 1 ? position : "(" + position + ")") + " * " + n * (n + 1) / 2 + " + ";
             position = new StringBuilder(former + "row * (row + 1) / 2 + column");
         }
-        code.addStatement("int position = $L", position.isEmpty() ? "0" : position);
+        code.addStatement(
+                "$L $L", isLookedUp() ? "int position =" : "return", position.isEmpty() ? "0" : position.toString());
         return code.build();
     }
 

@@ -1,5 +1,6 @@
 package io.github.gammawright.emission;
 
+import io.github.gammawright.definition.CorrectRounding;
 import io.github.gammawright.graph.Instruction;
 import io.github.gammawright.graph.Instruction.Operator;
 import io.github.gammawright.graph.RealFunction;
@@ -85,7 +86,7 @@ final class JavaExpressions {
     private Text expression(int number) {
         Instruction instruction = program.instruction(number);
         if (instruction instanceof Instruction.Constant constant) {
-            String literal = DoubleLiteral.of(DoubleLiteral.nearest(constant.value()));
+            String literal = DoubleLiteral.of(CorrectRounding.toDouble(constant.value()));
             return new Text(literal, literal.startsWith("-") ? Level.SIGNED : Level.ATOM);
         }
         if (instruction instanceof Instruction.Pi) {

@@ -3,20 +3,21 @@ package io.github.gammawright.emission;
 import com.palantir.javapoet.CodeBlock;
 import java.util.Arrays;
 import java.util.List;
+import java.util.function.IntFunction;
 
 /** Writes statements as Java. */
 final class JavaStatements {
 
-    /** Zeros in a row from this many on are written by one call. */
-    static final int LONG_RUN = 9;
+    /** Zeros in a row from this many on are written by one call; up to it, single stores were measured faster. */
+    static final int LONG_RUN = 33;
 
     private final JavaExpressions expressions;
-    private final ValueNames names;
+    private final IntFunction<String> variables;
     private final List<ArrayTarget> arrays;
 
-    JavaStatements(JavaExpressions expressions, ValueNames names, List<ArrayTarget> arrays) {
+    JavaStatements(JavaExpressions expressions, IntFunction<String> variables, List<ArrayTarget> arrays) {
         this.expressions = expressions;
-        this.names = names;
+        this.variables = variables;
         this.arrays = List.copyOf(arrays);
     }
 
@@ -30,7 +31,7 @@ final class JavaStatements {
 
     private void print(Statement statement, CodeBlock.Builder code) {
         if (statement instanceof Statement.Define define) {
-            String name = names.variable(define.value());
+            String name = variables.apply(define.value());
             add(code, "double " + name + " = " + expressions.definition(define.value()));
         } else if (statement instanceof Statement.Store store) {
             String target = arrays.get(store.array()).element(store.slot());

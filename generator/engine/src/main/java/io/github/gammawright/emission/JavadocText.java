@@ -43,6 +43,12 @@ final class JavadocText {
         return c != '/' || before.isEmpty() || before.charAt(before.length() - 1) == '*';
     }
 
+    /** What text files should not hold: controls, halves of characters, what changes direction or shows nothing. */
+    static boolean isUnprintable(int c) {
+        boolean control = c < ' ' || (c >= 0x7F && c < 0xA0) || c == 0x2028 || c == 0x2029;
+        return control || isInvisible(c) || (c >= 0xD800 && c < 0xE000);
+    }
+
     /** Characters that change the direction of text, or show nothing. */
     private static boolean isInvisible(int c) {
         return c == 0xAD

@@ -50,6 +50,9 @@ final class KernelNames {
             "operands");
 
     private final NameAllocator allocator = new NameAllocator();
+    /** Methods may be called as variables are. */
+    private final NameAllocator methods = new NameAllocator();
+
     private final String className;
     private final List<KernelInput> inputs;
     private final List<String> results = new ArrayList<>();
@@ -88,7 +91,7 @@ final class KernelNames {
             parameters.add(allocator.allocate(parameter.name()));
         }
         for (MetricDefinition.CallerFunction function : definition.functions()) {
-            functions.add(allocator.allocate(function.name()));
+            functions.add(methods.allocate(function.name()));
         }
         for (KernelInput input : inputs) {
             if (input.kind() != Symbol.Kind.COORDINATE) {

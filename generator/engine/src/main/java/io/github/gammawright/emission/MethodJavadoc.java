@@ -74,9 +74,9 @@ final class MethodJavadoc {
     }
 
     static String inDomain(EmissionContext context, boolean allocates) {
-        return "Whether a point meets the conditions of the definition; NaN meets none."
-                + (allocates ? " Allocates memory for the caller's functions." : "")
-                + "\n\n@param point " + pointEntries(context) + "\n"
+        return JavadocText.wrap("Whether a point meets the conditions of the definition; NaN meets none."
+                        + (allocates ? " Allocates memory for the caller's functions." : ""))
+                + "\n\n@param point " + pointEntries(context) + "\n@return whether it does\n"
                 + "@throws IllegalArgumentException if the array has a wrong length\n";
     }
 

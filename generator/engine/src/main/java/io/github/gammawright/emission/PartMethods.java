@@ -7,6 +7,7 @@ import java.util.BitSet;
 import java.util.List;
 import java.util.Set;
 import java.util.TreeSet;
+import java.util.function.IntFunction;
 import javax.lang.model.element.Modifier;
 
 /** Writes a body that is too large for one method as several, and the code that calls them in turn. */
@@ -15,13 +16,15 @@ final class PartMethods {
     /** The virtual machine's compiler refuses methods with too many arguments. */
     static final int MOST_ARGUMENTS = 24;
 
+    /** With more variables than this, each method has names of its own for them. */
+    static final int MOST_NAMES = 8_000;
+
     /** Calls of so many parts fit easily into one method. */
     private static final int CALLS_AT_ONCE = 48;
 
     private final EmissionContext context;
     private final Body body;
     private final List<List<Statement>> parts;
-    private final JavaExpressions expressions;
     private final List<ArrayTarget> arrays;
     private final BitSet arguments;
     private final ValueHomes homes;
@@ -38,7 +41,6 @@ final class PartMethods {
         this.body = body;
         this.parts = parts;
         this.prefix = prefix;
-        this.expressions = body.values().printer(body.inlining(), context.functions());
         this.arrays = new ArrayList<>(body.arrays());
         arrays.add(new ArrayTarget("workspace", null));
         BitSet inputs = new BitSet();
@@ -185,18 +187,20 @@ final class PartMethods {
 
         CodeBlock code() {
             CodeBlock.Builder code = CodeBlock.builder();
+            boolean many = body.inlining().variables().cardinality() > MOST_NAMES;
+            IntFunction<String> names = many ? body.values().ofOneMethod() : body.values()::variable;
             for (int value : loads) {
                 String name = body.isVariable(value)
-                        ? body.values().variable(value)
+                        ? names.apply(value)
                         : body.values().given(value);
                 code.addStatement("double $L = $L", name, element(value));
             }
-            JavaStatements printer = new JavaStatements(expressions, body.values(), arrays);
+            JavaExpressions expressions = body.values().printer(body.inlining(), names, context.functions());
+            JavaStatements printer = new JavaStatements(expressions, names, arrays);
             for (Statement statement : statements) {
                 code.add(printer.print(List.of(statement)));
                 if (statement instanceof Statement.Define define && homes.isWritten(define.value())) {
-                    code.addStatement(
-                            "$L = $L", element(define.value()), body.values().variable(define.value()));
+                    code.addStatement("$L = $L", element(define.value()), names.apply(define.value()));
                 }
             }
             return code.build();

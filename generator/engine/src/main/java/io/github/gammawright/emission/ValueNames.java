@@ -11,6 +11,7 @@ import java.util.function.IntFunction;
 final class ValueNames {
 
     private final StraightLineProgram program;
+    private final KernelNames kernel;
     private final Map<Integer, String> variables = new HashMap<>();
     private final Map<Integer, String> given = new HashMap<>();
     private final TemporaryNames temporaries;
@@ -22,6 +23,7 @@ final class ValueNames {
      */
     ValueNames(StraightLineProgram program, KernelNames kernel, Map<Integer, String> components) {
         this.program = program;
+        this.kernel = kernel;
         this.temporaries = new TemporaryNames(program, kernel.allocator(), this::known, components);
         Map<Symbol, String> derivatives = new HashMap<>();
         for (int i = 0; i < program.size(); i++) {
@@ -66,10 +68,27 @@ final class ValueNames {
         return name != null ? name : variables.get(number);
     }
 
+    /**
+     * Names for the variables of one method alone: the author's as ever, all others counted anew. A class keeps a
+     * constant for each name of a variable, so that large ones cannot afford a name for each value.
+     */
+    IntFunction<String> ofOneMethod() {
+        NameAllocator allocator = kernel.allocator().copy();
+        Map<Integer, String> names = new HashMap<>();
+        return number -> program.names().containsKey(number)
+                ? variable(number)
+                : names.computeIfAbsent(number, n -> allocator.next("t"));
+    }
+
     /** A printer for a body with the given variables. */
     JavaExpressions printer(Inlining inlining, JavaExpressions.FunctionCalls functions) {
+        return printer(inlining, this::variable, functions);
+    }
+
+    /** A printer for a body with the given variables, which have names of their own. */
+    JavaExpressions printer(Inlining inlining, IntFunction<String> variables, JavaExpressions.FunctionCalls functions) {
         IntFunction<String> names =
-                i -> isGiven(i) ? given(i) : inlining.variables().get(i) ? variable(i) : null;
+                i -> isGiven(i) ? given(i) : inlining.variables().get(i) ? variables.apply(i) : null;
         return new JavaExpressions(program, names, functions);
     }
 }

@@ -17,6 +17,8 @@ public final class Optimiser {
     private static final int FREE_VALUES = 60;
     private static final int MOST_MEMBERS = 500;
     private static final int LARGEST = 25_000;
+    private static final int MOST_STARTS = 3;
+    private static final double MOST_DEARER = 1.3;
 
     /** What a program may reach at the guard's points, so that it stays below 4 limits everywhere. */
     private static final double TOLERANCE = 2.5;
@@ -52,8 +54,14 @@ public final class Optimiser {
                 .thenComparingDouble(State::error);
     }
 
-    /** What came out. */
-    public record Outcome(LoweredProgram program, int start) {}
+    /**
+     * What came out.
+     *
+     * @param program the best program
+     * @param start the number of the start that it came from
+     * @param error its worst error at the guard's points in multiples of the conditioning limit
+     */
+    public record Outcome(LoweredProgram program, int start, double error) {}
 
     /**
      * The best program found for some outputs.
@@ -68,9 +76,9 @@ public final class Optimiser {
             NumericGuard guard = new NumericGuard(starts.get(i).program(), exact, points, TOLERANCE);
             states.add(new State(starts.get(i), network.totalCost(), guard.reached(), i));
         }
-        int width = Math.max(2, states.size());
         List<State> seen = new ArrayList<>(states);
-        List<State> current = states;
+        List<State> current = promising(states);
+        int width = Math.max(2, current.size());
         for (int generation = 0; spent < budget; generation++) {
             List<State> next = new ArrayList<>();
             for (int i = 0; i < width && spent < budget; i++) {
@@ -87,7 +95,27 @@ public final class Optimiser {
             current = seen;
         }
         State best = seen.stream().min(order(seen)).orElseThrow();
-        return new Outcome(best.program(), best.start());
+        return new Outcome(best.program(), best.start(), best.error());
+    }
+
+    /** The starts that are worth a try: no two alike, none much dearer than the best, few in all. */
+    private static List<State> promising(List<State> states) {
+        List<State> sorted = new ArrayList<>(states);
+        sorted.sort(order(states));
+        List<State> promising = new ArrayList<>();
+        for (State state : sorted) {
+            boolean known = promising.stream()
+                    .anyMatch(other -> other.program()
+                            .program()
+                            .instructions()
+                            .equals(state.program().program().instructions()));
+            boolean dear = !promising.isEmpty()
+                    && state.cost() > MOST_DEARER * promising.get(0).cost();
+            if (!known && !dear && promising.size() < MOST_STARTS) {
+                promising.add(state);
+            }
+        }
+        return promising;
     }
 
     private State round(State parent, long seed) {

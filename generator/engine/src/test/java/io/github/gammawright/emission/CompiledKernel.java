@@ -1,33 +1,38 @@
 package io.github.gammawright.emission;
 
+import static org.assertj.core.api.Assertions.assertThat;
+
+import io.github.gammawright.verification.CompiledClasses;
+import io.github.gammawright.verification.InMemoryCompiler;
+import io.github.gammawright.verification.MethodSize;
 import java.lang.reflect.Constructor;
 import java.lang.reflect.InvocationTargetException;
 import java.lang.reflect.Method;
 import java.util.Arrays;
 import java.util.List;
-import java.util.Map;
-import java.util.TreeMap;
-import org.objectweb.asm.ClassReader;
 
 /** An emitted class, compiled in memory and called by reflection. */
 final class CompiledKernel {
 
     final String source;
-    final Map<String, byte[]> classFiles;
+    final CompiledClasses classes;
     final Class<?> type;
 
-    private CompiledKernel(String source, Map<String, byte[]> classFiles, Class<?> type) {
+    private CompiledKernel(String source, CompiledClasses classes) {
         this.source = source;
-        this.classFiles = classFiles;
-        this.type = type;
+        this.classes = classes;
+        this.type = classes.load();
     }
 
     static CompiledKernel of(KernelModel model) {
         String source = KernelEmitter.emit(model);
-        String qualified =
-                model.packageName().isEmpty() ? model.className() : model.packageName() + "." + model.className();
-        Map<String, byte[]> files = MemoryCompiler.compile(qualified, source);
-        return new CompiledKernel(source, files, MemoryCompiler.load(files, qualified));
+        String name = model.packageName().isEmpty() ? model.className() : model.packageName() + "." + model.className();
+        CompiledClasses classes = InMemoryCompiler.ofThisJdk().compile(name, source);
+        assertThat(classes.warnings()).isEmpty();
+        for (MethodSize size : classes.methodSizes()) {
+            assertThat(size.bytecodes()).as(size.toString()).isLessThanOrEqualTo(7000);
+        }
+        return new CompiledKernel(source, classes);
     }
 
     Object create(Object... arguments) {
@@ -59,13 +64,6 @@ final class CompiledKernel {
         } catch (IllegalAccessException e) {
             throw new LinkageError(e.getMessage(), e);
         }
-    }
-
-    /** The bytes of code of every method in every class file. */
-    Map<String, Integer> methodSizes() {
-        Map<String, Integer> sizes = new TreeMap<>();
-        classFiles.forEach((file, bytes) -> MethodSizes.read(new ClassReader(bytes), file, sizes));
-        return sizes;
     }
 
     int constant(String name) {

@@ -3,7 +3,9 @@ package io.github.gammawright.emission;
 import com.palantir.javapoet.CodeBlock;
 import com.palantir.javapoet.MethodSpec;
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.List;
+import java.util.Set;
 import java.util.function.Function;
 import java.util.function.IntFunction;
 import javax.lang.model.element.Modifier;
@@ -15,6 +17,7 @@ final class ArgumentChecks {
     private static final int MOST_RESULTS = 8;
 
     private final EmissionContext context;
+    private final Set<String> written = new HashSet<>();
     private boolean distinct;
     private boolean apart;
 
@@ -111,7 +114,9 @@ final class ArgumentChecks {
                 arguments.add(offsets.get(i));
             }
         }
-        context.privateMethods().add(method.addCode(row).build());
+        if (written.add(name)) {
+            context.privateMethods().add(method.addCode(row).build());
+        }
         return CodeBlock.of("$L;\n", LineBreaks.wrap(name + "(" + String.join(", ", arguments) + ")"));
     }
 

@@ -3,8 +3,10 @@ package io.github.gammawright.emission;
 import io.github.gammawright.graph.Instruction;
 import io.github.gammawright.graph.StraightLineProgram;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Set;
 
 /**
@@ -72,5 +74,29 @@ record Body(
         statements.stream().filter(s -> !(s instanceof Statement.Zero)).forEach(sorted::add);
         statements.stream().filter(s -> s instanceof Statement.Zero).forEach(sorted::add);
         return new Body(program, inlining, values, sorted, arrays);
+    }
+
+    /**
+     * The same with each variable written into one entry only, and copied from there into the others at the end: a
+     * little more work, and more entries that may serve as memory before.
+     */
+    Body withCopiesLast() {
+        List<Statement> first = new ArrayList<>();
+        List<Statement> last = new ArrayList<>();
+        Map<Integer, Statement.Store> stored = new HashMap<>();
+        for (Statement statement : statements) {
+            if (statement instanceof Statement.Store store && isVariable(store.value())) {
+                Statement.Store origin = stored.putIfAbsent(store.value(), store);
+                if (origin == null) {
+                    first.add(store);
+                } else {
+                    last.add(new Statement.Copy(store.array(), store.slot(), origin.array(), origin.slot()));
+                }
+            } else {
+                first.add(statement);
+            }
+        }
+        first.addAll(last);
+        return new Body(program, inlining, values, first, arrays).withZerosLast();
     }
 }

@@ -65,10 +65,17 @@ final class BodyMethods {
             JavaExpressions printer = context.values().printer(inlining, context.functions());
             return new JavaStatements(printer, context.values()::variable, body.arrays()).print(body.statements());
         }
-        body = body.withZerosLast();
-        parts = Partition.of(body, new BytecodeSize(body));
-        PartMethods methods = new PartMethods(context, body, parts, "part", workspaceLength);
+        PartMethods methods = split(body.withZerosLast());
+        if (methods.workspaceLength() > workspaceLength) {
+            PartMethods others = split(body.withCopiesLast());
+            methods = others.workspaceLength() < methods.workspaceLength() ? others : methods;
+        }
         workspaceLength = methods.workspaceLength();
         return methods.emit();
+    }
+
+    private PartMethods split(Body body) {
+        List<List<Statement>> parts = Partition.of(body, new BytecodeSize(body));
+        return new PartMethods(context, body, parts, "part", workspaceLength);
     }
 }

@@ -37,6 +37,9 @@ final class BytecodeSize {
         if (statement instanceof Statement.Zero zero) {
             return Math.min(zero.to() - zero.from(), JavaStatements.LONG_RUN + 1) * (ELEMENT + 1);
         }
+        if (statement instanceof Statement.Copy) {
+            return 2 * ELEMENT;
+        }
         if (statement instanceof Statement.Define define) {
             return expression(define.value(), variable) + variable;
         }

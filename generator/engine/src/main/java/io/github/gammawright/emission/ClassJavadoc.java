@@ -126,6 +126,7 @@ final class ClassJavadoc {
                 + JavadocText.escape(context.model().program().count().toString())
                 + ". Inputs are read before anything is written, so that a result may be an input array; no two results"
                 + " may be one array. Objects are immutable and may be shared by threads.");
+        context.model().remarks().forEach(remark -> paragraph(JavadocText.escape(remark)));
         paragraph("To make it again: " + code(context.model().regenerate()));
         paragraph("For research use: not validated for navigation or other safety-critical use, which follows its own"
                 + " standards and licensed practice.");

@@ -2,6 +2,8 @@ package io.github.gammawright.emission;
 
 import java.math.BigDecimal;
 import java.math.MathContext;
+import java.math.RoundingMode;
+import java.util.List;
 
 /** Writes doubles as Java literals. */
 final class DoubleLiteral {
@@ -24,9 +26,12 @@ final class DoubleLiteral {
         }
         BigDecimal exact = new BigDecimal(value);
         for (int digits = 1; ; digits++) {
-            BigDecimal rounded = exact.round(new MathContext(digits));
-            if (rounded.doubleValue() == value) {
-                return text(rounded.stripTrailingZeros());
+            // at powers of two the nearest decimal may miss where one that is rounded away does not
+            for (RoundingMode rounding : List.of(RoundingMode.HALF_EVEN, RoundingMode.UP, RoundingMode.DOWN)) {
+                BigDecimal rounded = exact.round(new MathContext(digits, rounding));
+                if (rounded.doubleValue() == value) {
+                    return text(rounded.stripTrailingZeros());
+                }
             }
         }
     }

@@ -36,6 +36,9 @@ final class JavaStatements {
         } else if (statement instanceof Statement.Store store) {
             String target = arrays.get(store.array()).element(store.slot());
             add(code, target + " = " + expressions.print(store.value()));
+        } else if (statement instanceof Statement.Copy copy) {
+            String source = arrays.get(copy.fromArray()).element(copy.fromSlot());
+            add(code, arrays.get(copy.array()).element(copy.slot()) + " = " + source);
         } else if (statement instanceof Statement.Zero zero) {
             ArrayTarget array = arrays.get(zero.array());
             if (zero.to() - zero.from() >= LONG_RUN) {

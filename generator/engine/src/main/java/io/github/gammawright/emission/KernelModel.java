@@ -18,6 +18,7 @@ import java.util.List;
  * @param program computes every component; {@link Result#slots} refers to its instructions
  * @param domain the definition's conditions
  * @param regenerate the command line that makes the class again
+ * @param remarks further paragraphs for the class's documentation, in plain text
  */
 public record KernelModel(
         MetricDefinition definition,
@@ -27,10 +28,31 @@ public record KernelModel(
         List<Result> results,
         StraightLineProgram program,
         Domain domain,
-        String regenerate) {
+        String regenerate,
+        List<String> remarks) {
 
     public KernelModel {
         results = List.copyOf(results);
+        remarks = List.copyOf(remarks);
+    }
+
+    /** A model without remarks. */
+    public KernelModel(
+            MetricDefinition definition,
+            String packageName,
+            String className,
+            Layout layout,
+            List<Result> results,
+            StraightLineProgram program,
+            Domain domain,
+            String regenerate) {
+        this(definition, packageName, className, layout, results, program, domain, regenerate, List.of());
+    }
+
+    /** The same with remarks. */
+    public KernelModel withRemarks(List<String> remarks) {
+        return new KernelModel(
+                definition, packageName, className, layout, results, program, domain, regenerate, remarks);
     }
 
     /**

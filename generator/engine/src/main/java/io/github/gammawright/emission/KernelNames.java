@@ -12,42 +12,20 @@ import java.util.Map;
 /** All names of a class but those of its temporaries: each value has one name, the same in every method. */
 final class KernelNames {
 
-    private static final List<String> MEMBERS = List.of(
+    /** Fields, and arguments and variables of methods in which the author's names stand for values. */
+    private static final List<String> TAKEN = List.of(
             "DIMENSION",
             "LENGTH",
             "WORKSPACE_LENGTH",
+            "INDEX",
             "serialVersionUID",
             "functions",
             "constants",
+            "operands",
             "workspace",
-            "evaluate",
-            "evaluateAt",
-            "evaluateWith",
-            "evaluateScalars",
-            "evaluateBatch",
-            "valuesAt",
-            "inDomain",
-            "index",
-            "sign",
-            "compute",
-            "requireLength",
-            "requireRange",
-            "requireDistinct",
-            "readResolve",
-            "at",
-            "from",
             "result",
-            "tuple",
-            "to",
-            "results",
-            "values",
-            "array",
-            "length",
-            "name",
-            "x",
-            "packed",
-            "i_",
-            "operands");
+            "at",
+            "from");
 
     private final NameAllocator allocator = new NameAllocator();
     /** Methods may be called as variables are. */
@@ -66,12 +44,10 @@ final class KernelNames {
         this.definition = model.definition();
         this.className = model.className();
         this.inputs = KernelInput.of(model);
-        MEMBERS.forEach(allocator::reserve);
+        TAKEN.forEach(allocator::reserve);
         allocator.reserve(className);
         for (KernelInput input : inputs) {
             allocator.reserve(input.name());
-            allocator.reserve(input.plural());
-            allocator.reserve(input.plural() + "From");
             allocator.reserve(input.name() + "From");
         }
         for (KernelModel.Result result : model.results()) {
@@ -79,7 +55,7 @@ final class KernelNames {
             results.add(allocator.allocate(name));
             boolean single = model.results().size() == 1;
             offsets.add(single ? "at" : allocator.allocate(name + "At"));
-            allocator.reserve(single ? "at" : name + "To");
+            allocator.reserve(result.quantity().name() + "_INDEX");
             allocator.reserve(lengthConstant(result.quantity(), single));
         }
         List<String> coordinates = new ArrayList<>();

@@ -171,6 +171,9 @@ final class PartMethods {
                     }
                 } else if (statement instanceof Statement.Store store) {
                     touched.add(store.array());
+                } else if (statement instanceof Statement.Copy copy) {
+                    touched.add(copy.array());
+                    touched.add(copy.fromArray());
                 } else if (statement instanceof Statement.Zero zero) {
                     touched.add(zero.array());
                 }

@@ -52,6 +52,8 @@ final class ValueHomes {
                 body.reads(statement).forEach(value -> lastUse.put(value, part));
                 if (statement instanceof Statement.Store store) {
                     lastWrite.put(new Home(store.array(), store.slot()), p);
+                } else if (statement instanceof Statement.Copy copy) {
+                    lastWrite.put(new Home(copy.array(), copy.slot()), p);
                 } else if (statement instanceof Statement.Zero zero) {
                     for (int slot = zero.from(); slot < zero.to(); slot++) {
                         lastWrite.put(new Home(zero.array(), slot), p);

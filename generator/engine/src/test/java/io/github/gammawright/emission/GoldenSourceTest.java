@@ -3,11 +3,14 @@ package io.github.gammawright.emission;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import io.github.gammawright.geometry.Layout;
+import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.stream.Stream;
+import javax.tools.ToolProvider;
+import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.Arguments;
 import org.junit.jupiter.params.provider.MethodSource;
@@ -37,6 +40,29 @@ class GoldenSourceTest {
             Files.writeString(file, source);
         }
         assertThat(source).isEqualTo(Files.readString(file, StandardCharsets.UTF_8));
+    }
+
+    /** The compiler's own check of documentation comments: tags, entities, HTML, references. */
+    @ParameterizedTest(name = "{0}")
+    @MethodSource("models")
+    void documentationIsSound(String name, KernelModel model, @TempDir Path folder) throws IOException {
+        Path file = folder.resolve(model.className() + ".java");
+        Files.writeString(file, KernelEmitter.emit(model));
+        ByteArrayOutputStream messages = new ByteArrayOutputStream();
+        int status = ToolProvider.getSystemJavaCompiler()
+                .run(
+                        null,
+                        messages,
+                        messages,
+                        "-Xdoclint:all,-missing",
+                        "-Werror",
+                        "-proc:none",
+                        "-encoding",
+                        "UTF-8",
+                        "-d",
+                        folder.toString(),
+                        file.toString());
+        assertThat(status).as(messages.toString(StandardCharsets.UTF_8)).isZero();
     }
 
     @ParameterizedTest(name = "{0}")

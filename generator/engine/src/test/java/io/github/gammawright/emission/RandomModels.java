@@ -8,6 +8,7 @@ import io.github.gammawright.graph.RealFunction;
 import io.github.gammawright.graph.Symbol;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.Random;
 
 /** Kernel models with random programs: any operation on any earlier values, results drawn from all of them. */
@@ -48,7 +49,7 @@ final class RandomModels {
         }
         for (Quantity quantity : quantities) {
             for (String input : quantity.furtherInputs()) {
-                Symbol.Kind kind = input.equals("velocity") ? Symbol.Kind.VELOCITY : Symbol.Kind.MOMENTUM;
+                Symbol.Kind kind = Symbol.Kind.valueOf(input.toUpperCase(Locale.ROOT));
                 for (int i = 0; i < dimension; i++) {
                     values.add(model.program.load(kind, "x" + i, i));
                 }

@@ -37,7 +37,8 @@ class LimitsTest {
         int value = p.add(p.parameter("a", 0), p.constant(1));
         int sum = x;
         for (int i = 0; i < 1500; i++) {
-            value = p.add(p.multiply(value, p.parameter("b", 1)), p.call(RealFunction.SIN, p.add(value, p.constant(i))));
+            value = p.add(
+                    p.multiply(value, p.parameter("b", 1)), p.call(RealFunction.SIN, p.add(value, p.constant(i))));
             sum = i % 3 == 0 ? p.add(p.multiply(sum, p.constant(1, 2)), p.multiply(value, x)) : sum;
         }
         int parameterValue = value;
@@ -55,7 +56,9 @@ class LimitsTest {
         double[] point = {0.25, 0};
         double[] expected = DoubleInterpreter.run(
                 built.program(),
-                symbol -> symbol.kind() == Symbol.Kind.COORDINATE ? point[symbol.index()] : symbol.index() == 0 ? 0.3 : 0.2);
+                symbol -> symbol.kind() == Symbol.Kind.COORDINATE
+                        ? point[symbol.index()]
+                        : symbol.index() == 0 ? 0.3 : 0.2);
         assertThat((double[]) kernel.call(kernel.create(), "valuesAt", (Object) point))
                 .containsExactly(expected[sum], expected[parameterValue]);
         assertThatThrownBy(() -> kernel.create(0.9, 0.2))
@@ -167,17 +170,20 @@ class LimitsTest {
             arguments.add(array);
         }
         int first = arguments.size();
-        built.results().forEach(result -> arguments.add(new double[result.slots().size()]));
+        built.results()
+                .forEach(result -> arguments.add(new double[result.slots().size()]));
         kernel.call(kernel.create(), "evaluate", arguments.toArray());
-        double[] v = DoubleInterpreter.run(
-                built.program(), symbol -> symbol.kind() == Symbol.Kind.PARAMETER ? 0.75 : 0.5);
+        double[] v =
+                DoubleInterpreter.run(built.program(), symbol -> symbol.kind() == Symbol.Kind.PARAMETER ? 0.75 : 0.5);
         for (int r = 0; r < all.length; r++) {
             double[] expected = built.results().get(r).slots().stream()
                     .mapToDouble(slot -> slot < 0 ? 0 : v[slot])
                     .toArray();
             assertThat((double[]) arguments.get(first + r)).isEqualTo(expected);
         }
-        arguments.set(arguments.size() - 1, new double[built.results().get(all.length - 1).slots().size() + 1]);
+        arguments.set(
+                arguments.size() - 1,
+                new double[built.results().get(all.length - 1).slots().size() + 1]);
         assertThatThrownBy(() -> kernel.call(kernel.create(), "evaluate", arguments.toArray()))
                 .isInstanceOf(IllegalArgumentException.class);
     }

@@ -7,6 +7,7 @@ import static org.assertj.core.api.Assertions.within;
 import net.jqwik.api.ForAll;
 import net.jqwik.api.Property;
 import net.jqwik.api.constraints.DoubleRange;
+import net.jqwik.api.constraints.Scale;
 import org.junit.jupiter.api.Test;
 
 /** Velocities whose time component is known in closed form, and the ones that don't exist. */
@@ -108,9 +109,9 @@ class NormalizationTest {
 
     @Property
     void theSquareIsTheWantedOne(
-            @ForAll @DoubleRange(min = 1.5, max = 60) double radius,
-            @ForAll @DoubleRange(min = -2, max = 2) double radial,
-            @ForAll @DoubleRange(min = -2, max = 2) double angular,
+            @ForAll @DoubleRange(min = 1.5, max = 60) @Scale(12) double radius,
+            @ForAll @DoubleRange(min = -2, max = 2) @Scale(12) double radial,
+            @ForAll @DoubleRange(min = -2, max = 2) @Scale(12) double angular,
             @ForAll Causality causality,
             @ForAll Root root) {
         double[] point = {0, radius, 0};

@@ -1,0 +1,128 @@
+package io.github.gammawright.benchmarks;
+
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
+
+import io.github.gammawright.benchmarks.kernels.KerrFull;
+import io.github.gammawright.benchmarks.kernels.KerrGeodesicAcceleration;
+import io.github.gammawright.benchmarks.kernels.KerrHamiltonianFlow;
+import io.github.gammawright.benchmarks.kernels.KerrNonZero;
+import java.util.Arrays;
+import java.util.List;
+import java.util.Map;
+import org.junit.jupiter.api.Test;
+import org.openjdk.jmh.annotations.Benchmark;
+
+/** What the benchmarks compare gives the same numbers, and costs what it is said to cost. */
+class ContendersTest {
+
+    private static final int POINTS = 200;
+
+    /** The errors allowed are those of the methods: rounding, and for differences the truncation of the series as well. */
+    private static final Map<String, Double> TOLERANCES = Map.of(
+            "generatedNonZero", 1e-12,
+            "expertNonZero", 1e-12,
+            "generatedFull", 1e-12,
+            "expertFull", 1e-12,
+            "naiveEmission", 1e-12,
+            "automaticDifferentiation", 1e-7,
+            "finiteDifferences", 1e-3,
+            "computerAlgebra", 1e-12);
+
+    @Test
+    void allContendersAgreeWithTheReference() {
+        Accuracy accuracy = new Accuracy(POINTS);
+        List<Contender> contenders = Contender.all(KerrInputs.MASS, KerrInputs.SPIN);
+        for (Contender contender : contenders) {
+            assertThat(accuracy.worstError(contender))
+                    .as(contender.benchmark())
+                    .isLessThan(TOLERANCES.get(contender.benchmark()));
+        }
+        assertThat(contenders).hasSize(TOLERANCES.size());
+    }
+
+    @Test
+    void eachContenderHasABenchmark() {
+        List<String> benchmarks = Arrays.stream(ChristoffelBenchmark.class.getMethods())
+                .filter(method -> method.isAnnotationPresent(Benchmark.class))
+                .map(method -> method.getName())
+                .toList();
+        assertThat(Contender.all(1, 0.5).stream().map(Contender::benchmark).toList())
+                .containsAll(TOLERANCES.keySet())
+                .isSubsetOf(benchmarks);
+        assertThat(benchmarks).hasSize(TOLERANCES.size() + 1).contains("baseline");
+    }
+
+    @Test
+    void theExpertTakesFiftyOneOperations() {
+        assertThat(Operations.of(ExpertNonZero.class).description()).isEqualTo("51 + cos, sin");
+        assertThat(Operations.of(ExpertFull.class).description()).isEqualTo("51 + cos, sin");
+    }
+
+    @Test
+    void theGeneratorIsNoWorseThanTheExpert() {
+        for (Class<?> type : List.of(KerrNonZero.class, KerrFull.class)) {
+            Operations operations = Operations.of(type);
+            assertThat(operations.arithmetic()).as(type.getSimpleName()).isLessThanOrEqualTo(51);
+            assertThat(operations.calls()).isEqualTo(Map.of("sin", 1, "cos", 1));
+        }
+    }
+
+    @Test
+    void accelerationsAgree() {
+        DenseContraction contraction = new DenseContraction(KerrInputs.MASS, KerrInputs.SPIN);
+        KerrGeodesicAcceleration kernel = new KerrGeodesicAcceleration(KerrInputs.MASS, KerrInputs.SPIN);
+        KerrInputs inputs = new KerrInputs();
+        double[] expected = new double[4];
+        for (int n = 0; n < POINTS; n++) {
+            inputs.advance();
+            contraction.evaluate(inputs.point(), inputs.vector(), expected);
+            double[] actual = kernel.valuesAt(inputs.point(), inputs.vector());
+            double largest = Arrays.stream(expected).map(Math::abs).max().orElseThrow();
+            for (int k = 0; k < 4; k++) {
+                assertThat(actual[k]).isCloseTo(expected[k], within(1e-12 * largest));
+            }
+        }
+    }
+
+    /**
+     * Both forms of the geodesic equation give one acceleration: with p_i = g_ij u^j, dx^k/dλ is u^k, and
+     * dp_k/dλ = ½ ∂_k g_ij u^i u^j = Γ_ikj u^i u^j, here with the index of Γ lowered by the metric (common practice, no
+     * source).
+     */
+    @Test
+    void theHamiltonianFlowAgreesWithTheConnection() {
+        KerrMetric metric = new KerrMetric(KerrInputs.MASS, KerrInputs.SPIN);
+        KerrHamiltonianFlow kernel = new KerrHamiltonianFlow(KerrInputs.MASS, KerrInputs.SPIN);
+        KerrFull christoffel = new KerrFull(KerrInputs.MASS, KerrInputs.SPIN);
+        KerrInputs inputs = new KerrInputs();
+        double[] g = new double[16];
+        for (int n = 0; n < POINTS; n++) {
+            inputs.advance();
+            double[] point = inputs.point();
+            double[] velocity = inputs.vector();
+            metric.evaluate(point[1], point[2], g);
+            double[] momentum = new double[4];
+            for (int i = 0; i < 4; i++) {
+                for (int j = 0; j < 4; j++) {
+                    momentum[i] += g[4 * i + j] * velocity[j];
+                }
+            }
+            double[] gamma = christoffel.valuesAt(point);
+            double[] flow = kernel.valuesAt(point, momentum);
+            for (int k = 0; k < 4; k++) {
+                double rate = 0;
+                double size = 0;
+                for (int i = 0; i < 4; i++) {
+                    for (int j = 0; j < 4; j++) {
+                        double term = momentum[i] * gamma[KerrFull.index(i, k, j)] * velocity[j];
+                        rate += term;
+                        size += Math.abs(term);
+                    }
+                }
+                assertThat(flow[k]).isCloseTo(velocity[k], within(1e-12 * (1 + Math.abs(velocity[k]))));
+                assertThat(flow[4 + k]).isCloseTo(rate, within(1e-12 * size));
+            }
+        }
+    }
+}

@@ -17,7 +17,11 @@ class EllipsoidTest {
     private static final int PHI = 0;
     private static final int LAMBDA = 1;
 
-    /** φ, the meridian radius M = a(1 − e²)/(1 − e² sin²φ)^(3/2), the prime-vertical radius N = a/√(1 − e² sin²φ); in m. */
+    /**
+     * In metres, with all digits that the source has: φ, the meridian radius M = a(1 − e²)/(1 − e² sin²φ)^(3/2), the
+     * prime-vertical radius N = a/√(1 − e² sin²φ).
+     */
+    @SuppressWarnings("FloatingPointLiteralPrecision")
     private static final double[][] PUBLISHED = {
         {0.5, 6350089.970465150819450754, 6383049.675483407467551261},
         {Math.PI / 4, 6367381.815619548916741117, 6388838.290121147997511201},

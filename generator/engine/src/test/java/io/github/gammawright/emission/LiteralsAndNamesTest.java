@@ -32,7 +32,7 @@ class LiteralsAndNamesTest {
         assertThat(DoubleLiteral.of(0.6)).isEqualTo("0.6");
         assertThat(DoubleLiteral.of(-2)).isEqualTo("-2.0");
         assertThat(DoubleLiteral.of(2.0e-3)).isEqualTo("0.002");
-        assertThat(DoubleLiteral.of(1.0E23)).isEqualTo("1.0e23");
+        assertThat(DoubleLiteral.of(Double.parseDouble("1e23"))).isEqualTo("1.0e23");
         assertThat(DoubleLiteral.of(Math.scalb(1.0, -44))).isEqualTo("5.684341886080802e-14");
         assertThat(DoubleLiteral.of(1_000_000_000)).isEqualTo("1000000000.0");
         assertThat(DoubleLiteral.of(-0.0)).isEqualTo("-0.0");

@@ -33,7 +33,8 @@ public final class KernelGenerator {
         }
         Optimiser optimiser = new Optimiser(
                 DomainPoints.guard(definition, GUARD_POINTS),
-                budget(specification.options().effort()));
+                budget(specification.options().effort()),
+                specification.options().prefer() == GenerationOptions.Preference.ACCURACY ? 1.25 : 4);
         Optimiser.Outcome outcome =
                 optimiser.optimise(candidates.stream().map(Candidate::program).toList());
         Candidate origin = candidates.get(outcome.start());

@@ -25,6 +25,7 @@ public final class Optimiser {
 
     private final SamplePoints points;
     private final long budget;
+    private final double tradeOff;
     private long spent;
     private ExactOutputs exact;
 
@@ -35,6 +36,17 @@ public final class Optimiser {
      * @param budget how many values may be looked at as parts of a replacement
      */
     public Optimiser(SamplePoints points, long budget) {
+        this(points, budget, 4);
+    }
+
+    /**
+     * An optimiser that weighs cost against error.
+     *
+     * @param tradeOff how many times the least error seen a cheaper program may have; below 2 it is the error alone that decides, else all within
+     *     2.5 limits count as equally good
+     */
+    public Optimiser(SamplePoints points, long budget, double tradeOff) {
+        this.tradeOff = tradeOff;
         this.points = points;
         this.budget = budget;
     }
@@ -44,11 +56,11 @@ public final class Optimiser {
 
     /**
      * Orders states: those that keep their digits come before those that do not, and among either the cheap ones first.
-     * Where none stays within the tolerance, four times the least error counts as kept.
+     * Where none stays within the tolerance, a multiple of the least error counts as kept, four times it by default.
      */
-    private static Comparator<State> order(List<State> states) {
+    private Comparator<State> order(List<State> states) {
         double least = states.stream().mapToDouble(State::error).min().orElse(0);
-        double kept = Math.max(TOLERANCE, 4 * least);
+        double kept = Math.max(tradeOff < 2 ? 0 : TOLERANCE, tradeOff * least);
         return Comparator.comparing((State s) -> s.error() > kept)
                 .thenComparingInt(State::cost)
                 .thenComparingDouble(State::error);
@@ -99,7 +111,7 @@ public final class Optimiser {
     }
 
     /** The starts that are worth a try: no two alike, none much dearer than the best, few in all. */
-    private static List<State> promising(List<State> states) {
+    private List<State> promising(List<State> states) {
         List<State> sorted = new ArrayList<>(states);
         sorted.sort(order(states));
         List<State> promising = new ArrayList<>();

@@ -38,14 +38,10 @@ class FormulaRoundTripTest {
     private ExpressionGraph graph;
     private Map<String, Node> names;
 
-    /** Each root halves the points at which all have values, so that a graph with many is slow to build. */
-    private int rootsLeft;
-
     @Property
     void textCanBeReadAgain(@ForAll Random random) {
         graph = new ExpressionGraph();
         names = new HashMap<>();
-        rootsLeft = 3;
         List<Node> values = new ArrayList<>();
         for (int i = 0; i < 3; i++) {
             values.add(symbol(Symbol.Kind.COORDINATE, "x" + i, i));

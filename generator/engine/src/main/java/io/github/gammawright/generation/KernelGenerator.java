@@ -52,7 +52,7 @@ public final class KernelGenerator {
     private static long budget(GenerationOptions.Effort effort) {
         return switch (effort) {
             case QUICK -> 1_000_000;
-            case NORMAL -> 2_500_000;
+            case NORMAL -> 5_000_000;
             case THOROUGH -> 100_000_000;
         };
     }

@@ -78,8 +78,8 @@ class BuildPlanTest {
                         Optional.of("non-zero"),
                         Optional.of("observatory"),
                         Optional.of("thorough"),
-                        Optional.of("shared"),
-                        Optional.of(true),
+                        Optional.of("math"),
+                        Optional.of(false),
                         Optional.of("accuracy"),
                         new SourcePosition(2, 1, 10)),
                 table(Optional.empty(), "volume-element", "metric"));
@@ -93,8 +93,8 @@ class BuildPlanTest {
                                 Layout.NON_ZERO,
                                 new GenerationOptions(
                                         Effort.THOROUGH,
-                                        GenerationOptions.Trigonometry.SHARED,
-                                        true,
+                                        GenerationOptions.Trigonometry.MATH,
+                                        false,
                                         GenerationOptions.Preference.ACCURACY)),
                         standard("LanternStarVolumeElement", Quantity.VOLUME_ELEMENT),
                         standard("LanternStarMetric", Quantity.METRIC));

@@ -30,7 +30,10 @@ public final class GeodesicEquation extends PhaseSpaceEquation {
     @Override
     void derivatives(double[] point, double[] velocity, double[] derivatives) {
         acceleration.evaluate(point, velocity, result);
-        System.arraycopy(velocity, 0, derivatives, 0, velocity.length);
-        System.arraycopy(result, 0, derivatives, velocity.length, result.length);
+        int n = result.length;
+        for (int i = 0; i < n; i++) {
+            derivatives[i] = velocity[i];
+            derivatives[n + i] = result[i];
+        }
     }
 }

@@ -1,5 +1,6 @@
 package io.github.gammawright.runtime;
 
+import java.util.Arrays;
 import java.util.Objects;
 
 /**
@@ -13,6 +14,7 @@ public final class MetricTensor {
     private final int dimension;
     private final PointKernel kernel;
     private final double[] components;
+    private final LinearSystem system;
 
     /**
      * Takes the kernel that gives the components.
@@ -29,6 +31,7 @@ public final class MetricTensor {
         this.dimension = dimension;
         this.kernel = Objects.requireNonNull(kernel, "kernel");
         this.components = new double[dimension * dimension];
+        this.system = new LinearSystem(dimension);
     }
 
     /** How many coordinates there are. */
@@ -80,8 +83,25 @@ public final class MetricTensor {
         }
     }
 
+    /**
+     * Raises the index of a covector: u^i with g_ij u^j = p_i, the velocity that belongs to a momentum per unit of mass.
+     *
+     * @param point the coordinates; only read
+     * @param covector the covariant components; only read
+     * @param vector receives the contravariant components; may be the covector
+     * @throws IllegalArgumentException if an array has not one entry for each coordinate
+     * @throws NormalizationException if the metric has no inverse there
+     */
+    public void raise(double[] point, double[] covector, double[] vector) {
+        requireLength(covector);
+        requireLength(vector);
+        if (!system.solve(componentsAt(point), covector, vector)) {
+            throw new NormalizationException("at " + Arrays.toString(point) + " the metric has no inverse");
+        }
+    }
+
     /** All components at a point, row by row, in an array of this object that the next call writes over. */
-    double[] componentsAt(double[] point) {
+    public double[] componentsAt(double[] point) {
         kernel.evaluate(point, components);
         return components;
     }

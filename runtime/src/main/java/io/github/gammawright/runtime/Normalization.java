@@ -49,7 +49,7 @@ public final class Normalization {
                 c += g[i * n + j] * velocity[i] * velocity[j];
             }
         }
-        double solution = solve(a, b, c, root);
+        double solution = QuadraticRoots.solve(a, b, c, root);
         if (!Double.isFinite(solution)) {
             throw new NormalizationException("at " + Arrays.toString(point) + " no time component makes the velocity "
                     + name(causality) + " with the components " + Arrays.toString(Arrays.copyOfRange(velocity, 1, n))
@@ -81,18 +81,6 @@ public final class Normalization {
         for (int i = 0; i < velocity.length; i++) {
             velocity[i] *= factor;
         }
-    }
-
-    /** A root of a x² + 2 b x + c, each from the formula that subtracts no nearly equal numbers; NaN where there is none. */
-    private static double solve(double a, double b, double c, Root root) {
-        if (a == 0) {
-            return -c / (2 * b);
-        }
-        double q = -(b + Math.copySign(Math.sqrt(b * b - a * c), b));
-        double first = q / a;
-        // Both are zero when q is, and c then as well.
-        double second = q == 0 ? first : c / q;
-        return root == Root.LARGER ? Math.max(first, second) : Math.min(first, second);
     }
 
     private static String name(Causality causality) {

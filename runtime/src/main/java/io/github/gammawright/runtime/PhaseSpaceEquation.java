@@ -1,51 +1,15 @@
 package io.github.gammawright.runtime;
 
-import org.hipparchus.ode.OrdinaryDifferentialEquation;
+/** An equation whose state is a point followed by a vector there, n doubles each, and that is the same at any parameter. */
+public abstract sealed class PhaseSpaceEquation extends CurveEquation permits GeodesicEquation, HamiltonianEquation {
 
-/**
- * A system y' = f(y) whose state is a point followed by a vector there, n doubles each.
- *
- * <p>{@link #derivatives} allocates nothing. {@link #computeDerivatives}, which Hipparchus calls, allocates the array
- * that it returns and nothing else: the integrators keep that array as a stage of the step, so that it can't be used
- * again.
- *
- * <p>An equation has memory of its own between the two halves of the state and the kernel. Give each thread its own
- * equation; they may share a kernel.
- */
-public abstract sealed class PhaseSpaceEquation implements OrdinaryDifferentialEquation
-        permits GeodesicEquation, HamiltonianEquation {
-
-    private final int dimension;
     private final double[] point;
     private final double[] vector;
 
     PhaseSpaceEquation(int dimension) {
-        if (dimension < 1) {
-            throw new IllegalArgumentException("a point has at least one coordinate, not " + dimension);
-        }
-        this.dimension = dimension;
+        super(dimension, 2 * dimension);
         this.point = new double[dimension];
         this.vector = new double[dimension];
-    }
-
-    /** The length of the state: twice the number of coordinates. */
-    @Override
-    public final int getDimension() {
-        return 2 * dimension;
-    }
-
-    /**
-     * The derivative of the state; equal in value to {@link #derivatives}.
-     *
-     * @param parameter the curve's parameter, on which nothing here depends
-     * @param state the point, then the vector; only read
-     * @return a new array as long as the state
-     */
-    @Override
-    public final double[] computeDerivatives(double parameter, double[] state) {
-        double[] derivatives = new double[2 * dimension];
-        derivatives(state, derivatives);
-        return derivatives;
     }
 
     /**
@@ -56,11 +20,21 @@ public abstract sealed class PhaseSpaceEquation implements OrdinaryDifferentialE
      * @throws IllegalArgumentException if either array has not twice as many entries as there are coordinates
      */
     public final void derivatives(double[] state, double[] derivatives) {
-        requireLength("state", state);
-        requireLength("derivatives", derivatives);
-        System.arraycopy(state, 0, point, 0, dimension);
-        System.arraycopy(state, dimension, vector, 0, dimension);
-        derivatives(point, vector, derivatives);
+        requireLengths(state, derivatives);
+        double[] x = point;
+        double[] v = vector;
+        int n = x.length;
+        for (int i = 0; i < n; i++) {
+            x[i] = state[i];
+            v[i] = state[n + i];
+        }
+        derivatives(x, v, derivatives);
+    }
+
+    /** The same as {@link #derivatives(double[], double[])}, at any parameter. */
+    @Override
+    public final void derivatives(double parameter, double[] state, double[] derivatives) {
+        derivatives(state, derivatives);
     }
 
     /**
@@ -72,23 +46,14 @@ public abstract sealed class PhaseSpaceEquation implements OrdinaryDifferentialE
      * @throws IllegalArgumentException if either has not one entry for each coordinate
      */
     public final double[] state(double[] point, double[] vector) {
-        if (point.length != dimension || vector.length != dimension) {
-            throw new IllegalArgumentException("a state needs a point and a vector of " + dimension
-                    + " entries each, not " + point.length + " and " + vector.length);
+        int n = pointDimension();
+        if (point.length != n || vector.length != n) {
+            throw new IllegalArgumentException("a state needs a point and a vector of " + n + " entries each, not "
+                    + point.length + " and " + vector.length);
         }
-        double[] state = new double[2 * dimension];
-        System.arraycopy(point, 0, state, 0, dimension);
-        System.arraycopy(vector, 0, state, dimension, dimension);
-        return state;
+        return join(2 * n, point, vector);
     }
 
     /** The system itself; the first two arrays belong to this equation, and the last may not. */
     abstract void derivatives(double[] point, double[] vector, double[] derivatives);
-
-    private void requireLength(String name, double[] array) {
-        if (array.length != 2 * dimension) {
-            throw new IllegalArgumentException(
-                    name + " has " + array.length + " entries, and " + 2 * dimension + " are needed");
-        }
-    }
 }

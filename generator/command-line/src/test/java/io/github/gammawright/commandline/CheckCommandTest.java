@@ -55,6 +55,17 @@ class CheckCommandTest {
     }
 
     @Test
+    void servesTheCallersFunctionsBySamples() {
+        Program run = Program.run("check", "flrw-open", "--points", "6", "--effort", "quick");
+
+        assertThat(run.errors()).isEmpty();
+        for (Quantity quantity : Quantity.values()) {
+            assertThat(run.output()).contains("kernels.FlrwOpen" + quantity.classSuffix() + ": passed");
+        }
+        assertThat(run.status()).isZero();
+    }
+
+    @Test
     void whatCannotBeComparedFallsShort() throws IOException {
         Path file = Files.writeString(temporary.resolve("lens.metric.toml"), """
                 name = "lens"

@@ -1,13 +1,22 @@
 package io.github.gammawright.generation;
 
+import io.github.gammawright.emission.EmittedFunction;
+import java.util.List;
+
 /**
  * A class as it was emitted.
  *
  * @param specification what was asked for
  * @param source the whole text of the compilation unit, lines ended by a line feed
+ * @param functions how it asks for the caller's functions, in the definition's order
  * @param cost what the kernel costs, pass by pass
  */
-public record GeneratedClass(KernelSpecification specification, String source, CostReport cost) {
+public record GeneratedClass(
+        KernelSpecification specification, String source, List<EmittedFunction> functions, CostReport cost) {
+
+    public GeneratedClass {
+        functions = List.copyOf(functions);
+    }
 
     /** The path of the source file below a source root, with {@code /} between its parts. */
     public String path() {

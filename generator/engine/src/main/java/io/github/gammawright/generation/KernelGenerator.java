@@ -2,6 +2,7 @@ package io.github.gammawright.generation;
 
 import io.github.gammawright.definition.MetricDefinition;
 import io.github.gammawright.emission.KernelEmitter;
+import io.github.gammawright.emission.KernelModel;
 import io.github.gammawright.geometry.DomainPoints;
 import io.github.gammawright.geometry.DomainProgram;
 import io.github.gammawright.geometry.MetricGraphBuilder;
@@ -44,9 +45,10 @@ public final class KernelGenerator {
                         "graph (" + origin.description() + ")",
                         origin.program().program().count()),
                 new CostReport.Stage("resubstitution", program.program().count()));
-        String source = KernelEmitter.emit(KernelModels.of(
-                definition, specification, origin.zero(), program.program(), DomainProgram.of(definition)));
-        return new GeneratedClass(specification, source, new CostReport(stages));
+        KernelModel model = KernelModels.of(
+                definition, specification, origin.zero(), program.program(), DomainProgram.of(definition));
+        return new GeneratedClass(
+                specification, KernelEmitter.emit(model), KernelEmitter.functions(model), new CostReport(stages));
     }
 
     private static long budget(GenerationOptions.Effort effort) {

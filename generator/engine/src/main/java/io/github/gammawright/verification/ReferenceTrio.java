@@ -8,25 +8,27 @@ import java.util.ArrayList;
 import java.util.List;
 
 /**
- * The reference in three precisions: the one that is compared with; a finer one that tells small values from rounding
- * where they should be zero; and that of doubles, which tells how much noise a zero may have in a kernel. The last two
- * work only where they are needed.
+ * The reference in several precisions: the one that is compared with; two finer ones that tell small values from rounding
+ * where they should be zero; and that of doubles, which tells how much noise a zero may have in a kernel. All but the
+ * first work only where they are needed.
  */
 final class ReferenceTrio {
 
     private static final int MORE_DIGITS = 30;
 
-    /** Rounding shrinks by 30 digits in the finer precision, a value does not shrink. */
-    private static final double SHRINKS = 1e-10;
+    /** Two precisions agree on a value to better than this part of it, and on rounding never. */
+    private static final double AGREES = 0.1;
 
     private final ReferenceEvaluator evaluator;
     private final ReferenceEvaluator finer;
+    private final ReferenceEvaluator finest;
     private final ReferenceEvaluator plain;
     private ReferencePoint at;
 
     ReferenceTrio(ReferenceEvaluator evaluator) {
         this.evaluator = evaluator;
         this.finer = evaluator.finer(MORE_DIGITS);
+        this.finest = evaluator.finer(2 * MORE_DIGITS);
         this.plain = ReferenceEvaluator.inDoublePrecision(evaluator.definition());
     }
 
@@ -52,14 +54,28 @@ final class ReferenceTrio {
         List<Real> again = finer.at(point.parameters(), point.coordinates()).values(quantity, inputs);
         List<Real> values = new ArrayList<>(conditioned.values());
         List<Real> limits = new ArrayList<>(conditioned.limits());
+        List<Real> decisive = null;
         for (int i : suspects) {
-            if (Math.abs(again.get(i).toDouble())
-                    <= SHRINKS * Math.abs(values.get(i).toDouble())) {
+            if (agree(values.get(i), again.get(i))) {
+                continue;
+            }
+            // What is all rounding in one precision can still be a value in the next ones, or rounding again.
+            if (decisive == null) {
+                decisive = finest.at(point.parameters(), point.coordinates()).values(quantity, inputs);
+            }
+            if (agree(again.get(i), decisive.get(i))) {
+                values.set(i, decisive.get(i));
+            } else {
                 values.set(i, Real.ZERO);
                 limits.set(i, Real.ZERO);
             }
         }
         return new ReferencePoint.Conditioned(List.copyOf(values), List.copyOf(limits));
+    }
+
+    private static boolean agree(Real coarse, Real fine) {
+        double value = coarse.toDouble();
+        return Math.abs(fine.toDouble() - value) <= AGREES * Math.abs(value);
     }
 
     /** The greatest error that a plain evaluation in doubles makes in a component. */

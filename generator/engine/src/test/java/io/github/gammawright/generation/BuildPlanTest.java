@@ -167,6 +167,9 @@ class BuildPlanTest {
 
     @Test
     void aQuantityIsGivenOnce() {
+        assertThat(mistakes(NOTHING_ASKED, definition("kerr", table(Optional.of("A"), "metric", "metric"))))
+                .singleElement()
+                .satisfies(mistake -> assertThat(mistake.message()).isEqualTo("the quantity 'metric' is given twice"));
         assertThat(asking(Quantity.METRIC, Quantity.METRIC).complaints())
                 .containsExactly("the quantity 'metric' is given twice");
     }

@@ -7,6 +7,7 @@ import io.github.gammawright.generation.BuildSettings.Precedence;
 import io.github.gammawright.generation.CheckRun;
 import io.github.gammawright.generation.KernelSpecification;
 import io.github.gammawright.generation.Mistakes;
+import io.github.gammawright.generation.Splitting;
 import io.github.gammawright.geometry.Quantity;
 import io.github.gammawright.verification.CheckSettings;
 import io.github.gammawright.verification.KernelReport;
@@ -87,7 +88,7 @@ final class CheckCommand implements Callable<Integer> {
         Map<MetricDefinition, Set<KernelSpecification>> plan = new LinkedHashMap<>();
         for (MetricDefinition definition : definitions) {
             Set<KernelSpecification> kernels = plan.computeIfAbsent(definition, key -> new LinkedHashSet<>());
-            List<Quantity> all = Arrays.asList(Quantity.values());
+            List<Quantity> all = mistakes.attempt(() -> quantities(definition)).orElse(List.of());
             for (List<Quantity> quantities : List.of(all, List.<Quantity>of())) {
                 mistakes.attempt(() -> BuildPlan.of(List.of(definition), settings(quantities)))
                         .ifPresent(made -> made.parts().forEach(part -> kernels.addAll(part.kernels())));
@@ -95,6 +96,21 @@ final class CheckCommand implements Callable<Integer> {
         }
         mistakes.throwIfAny();
         return plan;
+    }
+
+    /** All that the metric has; says what is left out. */
+    private List<Quantity> quantities(MetricDefinition definition) {
+        List<Quantity> has = Splitting.quantities(definition);
+        List<String> others = Arrays.stream(Quantity.values())
+                .filter(quantity -> !has.contains(quantity))
+                .map(Quantity::symbol)
+                .toList();
+        if (!json && !others.isEmpty()) {
+            terminal.out()
+                    .println(definition.name() + ": no 3+1 split by "
+                            + definition.coordinates().get(0) + ", so without " + String.join(", ", others));
+        }
+        return has;
     }
 
     /** Without quantities these are the settings that leave the choice to the tables. */

@@ -155,6 +155,7 @@ public enum DiagnosticCode {
             "g_{0}{1} is not equal to g_{1}{0} on line {2}",
             "A metric is symmetric: correct one of the two."),
     METRIC_DEGENERATE(Subject.TEXT, "{0} is zero, so the metric is degenerate", ""),
+    METRIC_NOT_SPLIT(Subject.TEXT, "'{0}' needs a 3+1 split by the first coordinate '{1}', but {2}", "{3}"),
     CONSTANTS_TOO_COSTLY(
             Subject.TEXT,
             "the constant expressions of this definition call more than {0} functions",

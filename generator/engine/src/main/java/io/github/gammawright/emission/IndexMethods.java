@@ -114,8 +114,9 @@ final class IndexMethods {
         }
         if (triangle) {
             int n = shape.extents().get(shape.rank() - 1);
-            String i = indices.get(shape.rank() - 2);
-            String j = indices.get(shape.rank() - 1);
+            String counted = shape.first() == 0 ? "" : " - " + shape.first();
+            String i = indices.get(shape.rank() - 2) + counted;
+            String j = indices.get(shape.rank() - 1) + counted;
             code.addStatement("int row = $L.max($L, $L)", context.functions().math(), i, j);
             code.addStatement("int column = $L.min($L, $L)", context.functions().math(), i, j);
             String former =

@@ -1,6 +1,7 @@
 package io.github.gammawright.generation;
 
 import io.github.gammawright.geometry.Quantity;
+import java.util.Arrays;
 import java.util.List;
 import java.util.stream.Collectors;
 
@@ -32,7 +33,39 @@ final class ComponentLabels {
             case GEODESIC_ACCELERATION -> rate("u" + upper(tuple[0]));
             case HAMILTONIAN_FLOW ->
                 tuple[0] < names.size() ? rate(names.get(tuple[0])) : rate("p" + lower(tuple[0] - names.size()));
+            case STRESS_SOURCE ->
+                (latex ? "\\tfrac{1}{2} \\sqrt{|g|} " : "½ √|g| ") + partial(tuple[0]) + " g"
+                        + lower(tuple[1], tuple[2]);
+            case LAPSE -> alpha();
+            case SHIFT -> beta() + upper(space(tuple));
+            case SPATIAL_METRIC -> smallGamma() + lower(space(tuple));
+            case INVERSE_SPATIAL_METRIC -> smallGamma() + upper(space(tuple));
+            case SPATIAL_VOLUME_ELEMENT -> latex ? "\\sqrt{\\gamma}" : "√γ";
+            case SPATIAL_CHRISTOFFEL -> gamma() + upper(tuple[0] + 1) + lower(tuple[1] + 1, tuple[2] + 1);
+            case LAPSE_DERIVATIVE -> partial(tuple[0] + 1) + " " + alpha();
+            case SHIFT_DERIVATIVE -> partial(tuple[0] + 1) + " " + beta() + upper(tuple[1] + 1);
+            case SPATIAL_METRIC_DERIVATIVE ->
+                partial(tuple[0] + 1) + " " + smallGamma() + lower(tuple[1] + 1, tuple[2] + 1);
+            case EXTRINSIC_CURVATURE -> "K" + lower(space(tuple));
+            case MEAN_CURVATURE -> "K";
         };
+    }
+
+    /** Spatial indices as numbers of coordinates. */
+    private static int[] space(int... tuple) {
+        return Arrays.stream(tuple).map(i -> i + 1).toArray();
+    }
+
+    private String alpha() {
+        return latex ? "\\alpha" : "α";
+    }
+
+    private String beta() {
+        return latex ? "\\beta" : "β";
+    }
+
+    private String smallGamma() {
+        return latex ? "\\gamma" : "γ";
     }
 
     private String gamma() {
@@ -56,13 +89,13 @@ final class ComponentLabels {
     }
 
     private String[] namesOf(int... indices) {
-        return java.util.Arrays.stream(indices).mapToObj(names::get).toArray(String[]::new);
+        return Arrays.stream(indices).mapToObj(names::get).toArray(String[]::new);
     }
 
     /** Index names without a space where each is one letter, as one writes them. */
     private String group(String position, String... indices) {
-        boolean letters = java.util.Arrays.stream(indices).allMatch(name -> name.codePointCount(0, name.length()) == 1);
-        String joined = java.util.Arrays.stream(indices).collect(Collectors.joining(letters ? "" : " "));
+        boolean letters = Arrays.stream(indices).allMatch(name -> name.codePointCount(0, name.length()) == 1);
+        String joined = Arrays.stream(indices).collect(Collectors.joining(letters ? "" : " "));
         boolean brace = latex || (indices.length > 1 && !letters);
         return position + (brace ? "{" + joined + "}" : joined);
     }

@@ -37,6 +37,7 @@ public final class FormulaView {
     }
 
     private static List<String> build(MetricDefinition definition, Quantity quantity, FormulaPrinter.Form form) {
+        Splitting.require(definition, List.of(quantity));
         MetricGraph metric = MetricGraphBuilder.build(definition);
         Route route = Route.candidates(metric, List.of(quantity)).get(0);
         Geometry geometry = new Geometry(metric, route);

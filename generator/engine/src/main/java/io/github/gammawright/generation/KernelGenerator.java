@@ -28,6 +28,7 @@ public final class KernelGenerator {
     }
 
     private static GeneratedClass make(MetricDefinition definition, KernelSpecification specification) {
+        Splitting.require(definition, specification.quantities());
         List<Candidate> candidates = new ArrayList<>();
         for (Route route : Route.candidates(MetricGraphBuilder.build(definition), specification.quantities())) {
             candidates.addAll(Candidate.of(definition, specification.quantities(), route, candidates.isEmpty()));

@@ -31,7 +31,7 @@ final class MetricMistakes {
     }
 
     /** Where the metric is written. */
-    private static SourcePosition position(MetricForm form) {
+    static SourcePosition position(MetricForm form) {
         if (form instanceof MetricForm.LineElement lineElement) {
             return Expressions.start(lineElement.expression());
         }

@@ -11,7 +11,10 @@ import java.util.List;
 import java.util.Map;
 import java.util.SplittableRandom;
 
-/** Points of a definition's sample box that meet its conditions, the same in every run. */
+/**
+ * Points of a definition's sample box that meet its conditions, the same in every run; the caller's functions have the
+ * values of their samples there.
+ */
 public final class DomainPoints implements SamplePoints {
 
     private static final int FEW = 6;
@@ -20,9 +23,12 @@ public final class DomainPoints implements SamplePoints {
     private final List<Map<Symbol, Double>> points;
     private final SamplePoints others;
 
-    private DomainPoints(List<Map<Symbol, Double>> points) {
+    private final FunctionSamples functions;
+
+    private DomainPoints(MetricDefinition definition, List<Map<Symbol, Double>> points) {
         this.points = points;
         this.others = SamplePoints.arbitrary(points.size());
+        this.functions = new FunctionSamples(definition, this);
     }
 
     /** A few points of the domain; arbitrary ones if none is found. */
@@ -33,7 +39,7 @@ public final class DomainPoints implements SamplePoints {
     /** So many points of the domain; arbitrary ones if none is found. */
     public static SamplePoints draw(MetricDefinition definition, int wanted) {
         List<Map<Symbol, Double>> points = new Drawing(definition).points(wanted);
-        return points.isEmpty() ? SamplePoints.arbitrary(3) : new DomainPoints(points);
+        return points.isEmpty() ? SamplePoints.arbitrary(3) : new DomainPoints(definition, points);
     }
 
     /** So many points of the domain, and as many again close to its edges and to those of the sample box. */
@@ -44,7 +50,7 @@ public final class DomainPoints implements SamplePoints {
             return SamplePoints.arbitrary(wanted);
         }
         points.addAll(drawing.pressed(points));
-        return new DomainPoints(points);
+        return new DomainPoints(definition, points);
     }
 
     /** Draws points from a definition's box. */
@@ -159,8 +165,10 @@ public final class DomainPoints implements SamplePoints {
         if (value != null) {
             return value;
         }
-        double other = others.value(symbol, point);
+        if (symbol.kind() == Symbol.Kind.CALLER_FUNCTION) {
+            return functions.values(symbol).map(values -> values[point]).orElseGet(() -> others.value(symbol, point));
+        }
         // the entries of vectors take both signs
-        return symbol.kind() == Symbol.Kind.CALLER_FUNCTION ? other : 2 * (other - 1);
+        return 2 * (others.value(symbol, point) - 1);
     }
 }

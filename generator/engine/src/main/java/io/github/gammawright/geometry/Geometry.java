@@ -25,6 +25,7 @@ public final class Geometry {
     private Node[][][] metricDerivative;
     private Node[][][] firstKind;
     private Node[][][] christoffel;
+    private Slicing slicing;
 
     /** The geometry of a metric, along a route. */
     public Geometry(MetricGraph metric, Route route) {
@@ -49,6 +50,18 @@ public final class Geometry {
             case CONTRACTED_CHRISTOFFEL -> components.addAll(contracted());
             case GEODESIC_ACCELERATION -> components.addAll(geodesicAcceleration());
             case HAMILTONIAN_FLOW -> components.addAll(hamiltonianFlow());
+            case STRESS_SOURCE -> components.addAll(stressSource());
+            case LAPSE,
+                    SHIFT,
+                    SPATIAL_METRIC,
+                    INVERSE_SPATIAL_METRIC,
+                    SPATIAL_VOLUME_ELEMENT,
+                    SPATIAL_CHRISTOFFEL,
+                    LAPSE_DERIVATIVE,
+                    SHIFT_DERIVATIVE,
+                    SPATIAL_METRIC_DERIVATIVE,
+                    EXTRINSIC_CURVATURE,
+                    MEAN_CURVATURE -> components.addAll(slicing().components(quantity));
         }
         return components;
     }
@@ -65,7 +78,14 @@ public final class Geometry {
         }
     }
 
-    private InverseMetric inverse() {
+    private Slicing slicing() {
+        if (slicing == null) {
+            slicing = new Slicing(metric, route, this);
+        }
+        return slicing;
+    }
+
+    InverseMetric inverse() {
         if (inverse == null) {
             inverse = route.inverse(metric);
         }
@@ -73,7 +93,7 @@ public final class Geometry {
     }
 
     /** ∂_k g_ij; k, i, j. */
-    private Node[][][] metricDerivative() {
+    Node[][][] metricDerivative() {
         if (metricDerivative == null) {
             metricDerivative = new Node[n][n][n];
             for (int k = 0; k < n; k++) {
@@ -92,7 +112,7 @@ public final class Geometry {
     }
 
     /** Γ_kij = ½ (∂_i g_kj + ∂_j g_ki − ∂_k g_ij); k, i, j. */
-    private Node[][][] firstKind() {
+    Node[][][] firstKind() {
         if (firstKind == null) {
             Node[][][] d = metricDerivative();
             firstKind = new Node[n][n][n];
@@ -173,6 +193,21 @@ public final class Geometry {
             covector.add(sum);
         }
         return inverse().raise(covector);
+    }
+
+    /** ½ √|g| ∂_k g_ij. */
+    private List<Node> stressSource() {
+        Node half = graph.multiple(BigFraction.ONE_HALF, VolumeElement.of(graph, determinant()));
+        graph.keep(half);
+        List<Node> source = new ArrayList<>();
+        for (Node[][] matrix : metricDerivative()) {
+            for (Node[] row : matrix) {
+                for (Node derivative : row) {
+                    source.add(graph.multiply(half, derivative));
+                }
+            }
+        }
+        return source;
     }
 
     private List<Node> geodesicAcceleration() {

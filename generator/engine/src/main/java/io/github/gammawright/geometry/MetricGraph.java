@@ -3,6 +3,7 @@ package io.github.gammawright.geometry;
 import io.github.gammawright.graph.ExpressionGraph;
 import io.github.gammawright.graph.Node;
 import io.github.gammawright.graph.Symbol;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 
@@ -16,6 +17,8 @@ import java.util.Optional;
  *     when the metric was given by its components
  * @param velocities the symbols u^i
  * @param squares the author's line element as a sum of weighted squares of one-forms, where it is one
+ * @param split the author's lapse and shift, where the metric was given by them
+ * @param coframe the author's orthonormal one-forms, where the metric was given by them
  */
 @SuppressWarnings("ArrayRecordComponent") // the matrix is read by index everywhere and never handed out of the engine
 public record MetricGraph(
@@ -24,7 +27,9 @@ public record MetricGraph(
         Node[][] components,
         Optional<Node> quadraticForm,
         List<Symbol> velocities,
-        Optional<List<WeightedSquare>> squares) {
+        Optional<List<WeightedSquare>> squares,
+        Optional<Split> split,
+        Optional<Coframe> coframe) {
 
     /** The number of coordinates. */
     public int dimension() {
@@ -37,4 +42,53 @@ public record MetricGraph(
      * @param coefficients one for each coordinate
      */
     public record WeightedSquare(Node weight, List<Node> coefficients) {}
+
+    /**
+     * The split by the first coordinate.
+     *
+     * @param lapse α, of either sign
+     * @param shift β^i, from the second coordinate on
+     */
+    public record Split(Node lapse, List<Node> shift) {}
+
+    /**
+     * One-forms ω^a with g = Σ_a signs[a] ω^a ω^a.
+     *
+     * @param signs 1 or −1
+     * @param oneForms coefficients ω^a_i; a, i
+     */
+    public record Coframe(List<Integer> signs, List<List<Node>> oneForms) {}
+
+    MetricGraph with(Split given) {
+        return new MetricGraph(
+                graph, coordinates, components, quadraticForm, velocities, squares, Optional.of(given), coframe);
+    }
+
+    MetricGraph with(Coframe given) {
+        return new MetricGraph(
+                graph, coordinates, components, quadraticForm, velocities, squares, split, Optional.of(given));
+    }
+
+    /** The metric that this one induces where the first coordinate is constant. */
+    MetricGraph spatial() {
+        int n = dimension();
+        Node[][] spatial = new Node[n - 1][];
+        for (int i = 1; i < n; i++) {
+            spatial[i - 1] = Arrays.copyOfRange(components[i], 1, n);
+        }
+        Optional<List<WeightedSquare>> restricted = squares.map(list -> list.stream()
+                .map(square -> new WeightedSquare(
+                        square.weight(), square.coefficients().subList(1, n)))
+                .filter(square -> !square.coefficients().stream().allMatch(Node::isZero))
+                .toList());
+        return new MetricGraph(
+                graph,
+                coordinates.subList(1, n),
+                spatial,
+                Optional.empty(),
+                velocities.subList(1, n),
+                restricted,
+                Optional.empty(),
+                Optional.empty());
+    }
 }

@@ -39,7 +39,12 @@ public final class MetricGraphBuilder {
      * @throws UndefinedValueException where an expression has no value anywhere
      */
     public static MetricGraph build(MetricDefinition definition) {
-        return new MetricGraphBuilder(definition, DomainPoints.draw(definition)).build();
+        return build(definition, DomainPoints.draw(definition));
+    }
+
+    /** The same, on a graph that knows these points of the domain. */
+    static MetricGraph build(MetricDefinition definition, SamplePoints points) {
+        return new MetricGraphBuilder(definition, points).build();
     }
 
     private MetricGraph build() {
@@ -109,7 +114,8 @@ public final class MetricGraphBuilder {
         Node quadratic = graph.add(
                 graph.multiply(minusLapseSquared, graph.power(velocityOfTime, 2)),
                 scope.translator().translate(split.spatialLineElement()));
-        return metric(components(form), Optional.of(quadratic), squares);
+        return metric(components(form), Optional.of(quadratic), squares)
+                .with(new MetricGraph.Split(lapse, List.copyOf(shift)));
     }
 
     private MetricGraph coframe(MetricForm.Coframe coframe) {
@@ -132,7 +138,10 @@ public final class MetricGraphBuilder {
             graph.keep(along);
             terms.add(graph.multiple(new BigFraction(coframe.signs().get(a)), graph.power(along, 2)));
         }
-        return metric(components(total), Optional.of(graph.sum(terms)), Optional.of(squares));
+        List<List<Node>> coefficients =
+                squares.stream().map(WeightedSquare::coefficients).toList();
+        return metric(components(total), Optional.of(graph.sum(terms)), Optional.of(squares))
+                .with(new MetricGraph.Coframe(coframe.signs(), coefficients));
     }
 
     private MetricGraph matrix(MetricForm.Matrix matrix) {
@@ -164,6 +173,7 @@ public final class MetricGraphBuilder {
                 graph.keep(component);
             }
         }
-        return new MetricGraph(graph, scope.coordinates(), g, quadraticForm, velocities, squares);
+        return new MetricGraph(
+                graph, scope.coordinates(), g, quadraticForm, velocities, squares, Optional.empty(), Optional.empty());
     }
 }

@@ -28,7 +28,31 @@ public enum Quantity {
     /** −Γ^k_ij u^i u^j. */
     GEODESIC_ACCELERATION("−Γ^k_ij u^i u^j", List.of("velocity")),
     /** dx^i/dλ, then dp_i/dλ, of H = ½ g^ij p_i p_j. */
-    HAMILTONIAN_FLOW("dx^i/dλ, dp_i/dλ", List.of("momentum"));
+    HAMILTONIAN_FLOW("dx^i/dλ, dp_i/dλ", List.of("momentum")),
+    /** ½ √|g| ∂_k g_ij, to be multiplied with T^ij; k, i, j. */
+    STRESS_SOURCE("½ √|g| ∂_k g_ij", List.of()),
+    /** α = 1/√(−g^tt), t the first coordinate. */
+    LAPSE("α", List.of()),
+    /** β^i = −g^ti/g^tt; i from the second coordinate on, as all indices of spatial quantities. */
+    SHIFT("β^i", List.of()),
+    /** γ_ij = g_ij. */
+    SPATIAL_METRIC("γ_ij", List.of()),
+    /** γ^ij, the inverse of γ_ij. */
+    INVERSE_SPATIAL_METRIC("γ^ij", List.of()),
+    /** √det γ. */
+    SPATIAL_VOLUME_ELEMENT("√det γ", List.of()),
+    /** Γ^k_ij of γ_ij; k, i, j. */
+    SPATIAL_CHRISTOFFEL("Γ^k_ij of γ_ij", List.of()),
+    /** ∂_k α, k a spatial coordinate. */
+    LAPSE_DERIVATIVE("∂_k α", List.of()),
+    /** ∂_k β^i; k, i. */
+    SHIFT_DERIVATIVE("∂_k β^i", List.of()),
+    /** ∂_k γ_ij; k, i, j. */
+    SPATIAL_METRIC_DERIVATIVE("∂_k γ_ij", List.of()),
+    /** K_ij = −½ L_n γ_ij = (D_i β_j + D_j β_i − ∂_t γ_ij)/2α (York 1979): negative where space expands. */
+    EXTRINSIC_CURVATURE("K_ij", List.of()),
+    /** K = γ^ij K_ij. */
+    MEAN_CURVATURE("K", List.of());
 
     private final String formula;
     private final List<String> furtherInputs;
@@ -68,14 +92,39 @@ public enum Quantity {
         return furtherInputs;
     }
 
+    /** Whether the quantity belongs to the 3+1 split by the first coordinate, which not every metric allows. */
+    public boolean isOfSplit() {
+        return switch (this) {
+            case LAPSE,
+                    SHIFT,
+                    SPATIAL_METRIC,
+                    INVERSE_SPATIAL_METRIC,
+                    SPATIAL_VOLUME_ELEMENT,
+                    SPATIAL_CHRISTOFFEL,
+                    LAPSE_DERIVATIVE,
+                    SHIFT_DERIVATIVE,
+                    SPATIAL_METRIC_DERIVATIVE,
+                    EXTRINSIC_CURVATURE,
+                    MEAN_CURVATURE -> true;
+            default -> false;
+        };
+    }
+
     /** The index structure in n dimensions. */
     public Shape shape(int n) {
         return switch (this) {
             case METRIC, INVERSE_METRIC -> new Shape(List.of(n, n), 0, true);
             case VOLUME_ELEMENT -> new Shape(List.of(), 0, false);
-            case METRIC_DERIVATIVE, CHRISTOFFEL, CHRISTOFFEL_FIRST_KIND -> new Shape(List.of(n, n, n), 0, true);
+            case METRIC_DERIVATIVE, CHRISTOFFEL, CHRISTOFFEL_FIRST_KIND, STRESS_SOURCE ->
+                new Shape(List.of(n, n, n), 0, true);
             case CHRISTOFFEL_TRACE, CONTRACTED_CHRISTOFFEL, GEODESIC_ACCELERATION -> new Shape(List.of(n), 0, false);
             case HAMILTONIAN_FLOW -> new Shape(List.of(2 * n), 0, false);
+            case LAPSE, SPATIAL_VOLUME_ELEMENT, MEAN_CURVATURE -> new Shape(List.of(), 1, false);
+            case SHIFT, LAPSE_DERIVATIVE -> new Shape(List.of(n - 1), 1, false);
+            case SHIFT_DERIVATIVE -> new Shape(List.of(n - 1, n - 1), 1, false);
+            case SPATIAL_METRIC, INVERSE_SPATIAL_METRIC, EXTRINSIC_CURVATURE ->
+                new Shape(List.of(n - 1, n - 1), 1, true);
+            case SPATIAL_CHRISTOFFEL, SPATIAL_METRIC_DERIVATIVE -> new Shape(List.of(n - 1, n - 1, n - 1), 1, true);
         };
     }
 

@@ -2,14 +2,17 @@ package io.github.gammawright.geometry;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
 
 /**
  * One way of several to compute the quantities of a metric.
  *
  * @param inversion how the inverse metric is found
  * @param flow how the acceleration of geodesics is found
+ * @param bending how the extrinsic curvature is found
  */
-public record Route(Inversion inversion, Flow flow) {
+public record Route(Inversion inversion, Flow flow, Bending bending) {
 
     /** How the inverse metric is found. */
     public enum Inversion {
@@ -29,17 +32,34 @@ public record Route(Inversion inversion, Flow flow) {
         AUTHORS_FORM
     }
 
+    /** How the extrinsic and the mean curvature are found. */
+    public enum Bending {
+        /** From the first kind's Christoffel symbols; the mean curvature as their trace. */
+        CONNECTION,
+        /** As rate of change of the spatial metric along the normal; the mean curvature as that of the volume. */
+        LIE_DERIVATIVE,
+        /** As rate of change of the one-forms whose squares make up the spatial metric. */
+        SQUARES
+    }
+
     /** The route in words, for reports. */
     public String description() {
-        return inversion.name().toLowerCase(java.util.Locale.ROOT).replace('_', '-')
+        return words(inversion).replace(' ', '-')
                 + " inverse, flow by "
-                + flow.name().toLowerCase(java.util.Locale.ROOT).replace('_', ' ');
+                + words(flow)
+                + (bending == Bending.CONNECTION ? "" : ", extrinsic curvature by " + words(bending));
+    }
+
+    private static String words(Enum<?> way) {
+        return way.name().toLowerCase(Locale.ROOT).replace('_', ' ');
     }
 
     /** The routes that are worth a try for some quantities of a metric. */
     public static List<Route> candidates(MetricGraph metric, List<Quantity> quantities) {
         List<Inversion> inversions = new ArrayList<>(List.of(Inversion.BLOCKS));
-        if (RankOneInverse.of(metric).isPresent()) {
+        boolean split = quantities.stream().anyMatch(Quantity::isOfSplit);
+        if (RankOneInverse.of(metric).isPresent()
+                || (split && RankOneInverse.of(metric.spatial()).isPresent())) {
             inversions.add(Inversion.RANK_ONE);
         }
         List<Flow> flows = new ArrayList<>(List.of(Flow.COMPONENTS));
@@ -52,15 +72,32 @@ public record Route(Inversion inversion, Flow flow) {
         List<Route> routes = new ArrayList<>();
         for (Inversion inversion : inversions) {
             for (Flow flow : flows) {
-                routes.add(new Route(inversion, flow));
+                for (Bending bending : bendings(metric, quantities)) {
+                    routes.add(new Route(inversion, flow, bending));
+                }
             }
         }
         return routes;
     }
 
+    private static List<Bending> bendings(MetricGraph metric, List<Quantity> quantities) {
+        List<Bending> bendings = new ArrayList<>(List.of(Bending.CONNECTION));
+        boolean tensor = quantities.contains(Quantity.EXTRINSIC_CURVATURE);
+        if (tensor || quantities.contains(Quantity.MEAN_CURVATURE)) {
+            bendings.add(Bending.LIE_DERIVATIVE);
+        }
+        if (tensor && metric.squares().isPresent()) {
+            bendings.add(Bending.SQUARES);
+        }
+        return bendings;
+    }
+
+    /** The inverse of a metric or of its spatial part, to which the form of the other may not apply. */
     InverseMetric inverse(MetricGraph metric) {
-        if (inversion == Inversion.RANK_ONE) {
-            return RankOneInverse.of(metric).orElseThrow();
+        Optional<InverseMetric> updated =
+                inversion == Inversion.RANK_ONE ? RankOneInverse.of(metric) : Optional.empty();
+        if (updated.isPresent()) {
+            return updated.get();
         }
         MatrixInverse inverse = MatrixInverse.of(metric.graph(), metric.components());
         return new ComponentInverse(metric.graph(), inverse.components(), inverse.determinant());

@@ -262,7 +262,7 @@ public final class Lowering {
                 return whole(reciprocal(power.base()), numerator.negate());
             }
             // x^(−m/n) is the reciprocal of x^(m/n), which is likely to be there
-            Signed positive = lower(graph.power(power.base(), exponent.negate()));
+            Signed positive = positivePower(power.base(), exponent.negate());
             return new Signed(
                     program.divide(program.constant(BigFraction.ONE), positive.number()), positive.negative());
         }
@@ -270,6 +270,15 @@ public final class Lowering {
             return whole(lower(power.base()), numerator);
         }
         return root(power.base(), numerator, denominator);
+    }
+
+    private Signed positivePower(Node base, BigFraction exponent) {
+        Node positive = graph.power(base, exponent);
+        if (positive instanceof Node.Power power && power.base() == base) {
+            return power(power);
+        }
+        // as for reciprocals, the graph's other form may be computed from what is being computed here
+        return root(base, exponent.getNumerator(), exponent.getDenominator());
     }
 
     private Signed root(Node base, BigInteger numerator, BigInteger denominator) {

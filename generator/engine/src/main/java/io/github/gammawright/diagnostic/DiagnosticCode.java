@@ -182,7 +182,6 @@ public enum DiagnosticCode {
 
     KERNEL_TOO_LARGE(Subject.NOTHING, "the class {0} would need {1}, more than a class file can hold", ""),
 
-    OPTION_UNSUPPORTED(Subject.TEXT, "this version makes no classes with {0}", "Leave the option out."),
     TOO_MANY_MISTAKES(Subject.NOTHING, "{0} more mistakes are not shown", "Mend the first {1} and run again.");
 
     private enum Subject {

@@ -72,7 +72,7 @@ final class BytecodeSize {
         if (instruction instanceof Instruction.Constant || instruction instanceof Instruction.Pi) {
             return LITERAL;
         }
-        int size = instruction instanceof Instruction.Call ? CALL : 1;
+        int size = instruction instanceof Instruction.Call || instruction instanceof Instruction.MultiplyAdd ? CALL : 1;
         for (int operand : instruction.operands()) {
             size += operand(operand, variable);
         }

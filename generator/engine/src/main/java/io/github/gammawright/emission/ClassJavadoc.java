@@ -2,6 +2,7 @@ package io.github.gammawright.emission;
 
 import io.github.gammawright.definition.ExpressionPrinter;
 import io.github.gammawright.definition.MetricDefinition;
+import io.github.gammawright.graph.Instruction;
 import java.util.List;
 
 /** Writes the documentation of a kernel class: a reader needs nothing but the file. */
@@ -123,13 +124,30 @@ final class ClassJavadoc {
 
     private void use() {
         paragraph("Each evaluation writes every entry of every result and takes "
-                + JavadocText.escape(context.model().program().count().toString())
+                + JavadocText.escape(context.model().count().toString())
                 + ". Inputs are read before anything is written, so that a result may be an input array; no two results"
                 + " may be one array. Objects are immutable and may be shared by threads.");
+        trigonometry();
         context.model().remarks().forEach(remark -> paragraph(JavadocText.escape(remark)));
         paragraph("To make it again: " + code(context.model().regenerate()));
         paragraph("For research use: not validated for navigation or other safety-critical use, which follows its own"
                 + " standards and licensed practice.");
+    }
+
+    private void trigonometry() {
+        boolean circular = context.model().program().instructions().stream()
+                .anyMatch(i -> i instanceof Instruction.Call call && call.isCircular());
+        if (context.model().sharedTrigonometry() && circular) {
+            paragraph("Sine and cosine are the class's own: both of an argument together count as one sincos, their"
+                    + " errors are below one unit in the last place, and they are the same to the last bit on every"
+                    + " machine.");
+        }
+        boolean fused =
+                context.model().program().instructions().stream().anyMatch(i -> i instanceof Instruction.MultiplyAdd);
+        if (fused) {
+            paragraph("It calls Math.fma, which is one instruction on processors that have it and some hundred times"
+                    + " slower than a product and a sum on those that do not.");
+        }
     }
 
     private void paragraph(String escaped) {

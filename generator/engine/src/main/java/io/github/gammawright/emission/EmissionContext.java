@@ -48,7 +48,14 @@ record EmissionContext(
         }
         BitSet kept = ParameterWork.kept(program, roots);
         return new EmissionContext(
-                model, names, kernel, values, new FunctionNames(model.className()), kept, type, new ArrayList<>());
+                model,
+                names,
+                kernel,
+                values,
+                new FunctionNames(model.className(), model.sharedTrigonometry()),
+                kept,
+                type,
+                new ArrayList<>());
     }
 
     StraightLineProgram program() {

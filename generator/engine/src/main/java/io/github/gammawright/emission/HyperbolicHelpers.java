@@ -20,13 +20,12 @@ final class HyperbolicHelpers {
 
     void emit() {
         for (RealFunction function : context.functions().helpers()) {
-            context.privateMethods()
-                    .add(
-                            switch (function) {
-                                case ASINH -> asinh();
-                                case ACOSH -> acosh();
-                                default -> atanh();
-                            });
+            switch (function) {
+                case ASINH -> context.privateMethods().add(asinh());
+                case ACOSH -> context.privateMethods().add(acosh());
+                case ATANH -> context.privateMethods().add(atanh());
+                default -> {}
+            }
         }
     }
 

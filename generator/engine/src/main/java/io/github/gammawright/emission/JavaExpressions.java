@@ -36,6 +36,9 @@ final class JavaExpressions {
         /** The text before the opening parenthesis. */
         String callee(RealFunction function);
 
+        /** The product and sum in one rounding, up to the opening parenthesis. */
+        String fma();
+
         /** The circle's constant. */
         String pi();
     }
@@ -101,6 +104,14 @@ final class JavaExpressions {
                 arguments.add(operand(argument).text());
             }
             return new Text(functions.callee(call.function()) + "(" + String.join(", ", arguments) + ")", Level.ATOM);
+        }
+        if (instruction instanceof Instruction.MultiplyAdd fused) {
+            String product =
+                    operand(fused.left()).text() + ", " + operand(fused.right()).text();
+            return new Text(
+                    functions.fma() + "(" + product + ", "
+                            + operand(fused.addend()).text() + ")",
+                    Level.ATOM);
         }
         if (instruction instanceof Instruction.Arithmetic arithmetic) {
             Text left = operand(arithmetic.left());

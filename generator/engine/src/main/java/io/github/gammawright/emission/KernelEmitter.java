@@ -49,6 +49,7 @@ public final class KernelEmitter {
         new DomainMethod(context, functions).emit();
         indices.emit();
         new HyperbolicHelpers(context).emit();
+        new TrigonometryHelpers(context).emit();
         new ClassFileLimits(context).check();
         context.privateMethods().forEach(type::addMethod);
         if (functions.exist()) {

@@ -4,6 +4,7 @@ import io.github.gammawright.definition.MetricDefinition;
 import io.github.gammawright.geometry.Layout;
 import io.github.gammawright.geometry.Quantity;
 import io.github.gammawright.geometry.Shape;
+import io.github.gammawright.graph.OperationCount;
 import io.github.gammawright.graph.StraightLineProgram;
 import java.util.List;
 
@@ -18,6 +19,8 @@ import java.util.List;
  * @param program computes every component; {@link Result#slots} refers to its instructions
  * @param domain the definition's conditions
  * @param regenerate the command line that makes the class again
+ * @param sharedTrigonometry whether the class computes sine and cosine by itself, both of an argument at once, instead of
+ *     calling {@code Math}
  * @param remarks further paragraphs for the class's documentation, in plain text
  */
 public record KernelModel(
@@ -29,6 +32,7 @@ public record KernelModel(
         StraightLineProgram program,
         Domain domain,
         String regenerate,
+        boolean sharedTrigonometry,
         List<String> remarks) {
 
     public KernelModel {
@@ -36,7 +40,7 @@ public record KernelModel(
         remarks = List.copyOf(remarks);
     }
 
-    /** A model without remarks. */
+    /** A model that calls {@code Math}, without remarks. */
     public KernelModel(
             MetricDefinition definition,
             String packageName,
@@ -46,13 +50,33 @@ public record KernelModel(
             StraightLineProgram program,
             Domain domain,
             String regenerate) {
-        this(definition, packageName, className, layout, results, program, domain, regenerate, List.of());
+        this(definition, packageName, className, layout, results, program, domain, regenerate, false, List.of());
     }
 
     /** The same with remarks. */
     public KernelModel withRemarks(List<String> remarks) {
         return new KernelModel(
-                definition, packageName, className, layout, results, program, domain, regenerate, remarks);
+                definition,
+                packageName,
+                className,
+                layout,
+                results,
+                program,
+                domain,
+                regenerate,
+                sharedTrigonometry,
+                remarks);
+    }
+
+    /** The same with sine and cosine of its own, or with those of {@code Math}. */
+    public KernelModel withSharedTrigonometry(boolean shared) {
+        return new KernelModel(
+                definition, packageName, className, layout, results, program, domain, regenerate, shared, remarks);
+    }
+
+    /** What an evaluation costs. */
+    public OperationCount count() {
+        return sharedTrigonometry ? program.countWithSharedTrigonometry() : program.count();
     }
 
     /**

@@ -55,6 +55,9 @@ record KernelProgram(StraightLineProgram program, List<List<Integer>> slots, Lis
         if (instruction instanceof Instruction.Arithmetic a) {
             return new Instruction.Arithmetic(a.operator(), numbers[a.left()], numbers[a.right()]);
         }
+        if (instruction instanceof Instruction.MultiplyAdd m) {
+            return new Instruction.MultiplyAdd(numbers[m.left()], numbers[m.right()], numbers[m.addend()]);
+        }
         if (instruction instanceof Instruction.Negation n) {
             return new Instruction.Negation(numbers[n.operand()]);
         }

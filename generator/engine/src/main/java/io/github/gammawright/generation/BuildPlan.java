@@ -4,7 +4,6 @@ import io.github.gammawright.definition.MetricDefinition;
 import io.github.gammawright.definition.MetricDefinition.KernelEntry;
 import io.github.gammawright.diagnostic.DefinitionException;
 import io.github.gammawright.diagnostic.Diagnostic;
-import io.github.gammawright.diagnostic.DiagnosticCode;
 import io.github.gammawright.diagnostic.Diagnostics;
 import io.github.gammawright.generation.BuildSettings.Precedence;
 import io.github.gammawright.geometry.Layout;
@@ -51,7 +50,6 @@ public record BuildPlan(List<Part> parts) {
             List<KernelSpecification> kernels = new ArrayList<>();
             for (Planned planned : plan(definition, settings, diagnostics)) {
                 taken.claim(planned, definition, diagnostics);
-                refuseUnsupported(planned, diagnostics);
                 kernels.add(planned.specification());
             }
             parts.add(new Part(definition, kernels));
@@ -61,17 +59,6 @@ public record BuildPlan(List<Part> parts) {
             throw new DefinitionException(wrong);
         }
         return new BuildPlan(parts);
-    }
-
-    /** Refuses what the options can say but emission cannot do. */
-    private static void refuseUnsupported(Planned planned, Diagnostics diagnostics) {
-        GenerationOptions options = planned.specification().options();
-        if (options.trigonometry() == GenerationOptions.Trigonometry.SHARED) {
-            diagnostics.report(DiagnosticCode.OPTION_UNSUPPORTED, planned.position(), "trigonometry 'shared'");
-        }
-        if (options.fma()) {
-            diagnostics.report(DiagnosticCode.OPTION_UNSUPPORTED, planned.position(), "fma");
-        }
     }
 
     private static List<Planned> plan(MetricDefinition definition, BuildSettings settings, Diagnostics diagnostics) {

@@ -7,7 +7,8 @@ import io.github.gammawright.geometry.DomainPoints;
 import io.github.gammawright.geometry.DomainProgram;
 import io.github.gammawright.geometry.MetricGraphBuilder;
 import io.github.gammawright.geometry.Route;
-import io.github.gammawright.graph.LoweredProgram;
+import io.github.gammawright.graph.StraightLineProgram;
+import io.github.gammawright.optimiser.FusedOperations;
 import io.github.gammawright.optimiser.Optimiser;
 import java.util.ArrayList;
 import java.util.List;
@@ -40,14 +41,24 @@ public final class KernelGenerator {
         Optimiser.Outcome outcome =
                 optimiser.optimise(candidates.stream().map(Candidate::program).toList());
         Candidate origin = candidates.get(outcome.start());
-        LoweredProgram program = outcome.program();
-        List<CostReport.Stage> stages = List.of(
-                new CostReport.Stage(
-                        "graph (" + origin.description() + ")",
-                        origin.program().program().count()),
-                new CostReport.Stage("resubstitution", program.program().count()));
+        GenerationOptions options = specification.options();
+        boolean shared = options.trigonometry() == GenerationOptions.Trigonometry.SHARED;
+        StraightLineProgram program = outcome.program().program();
+        List<CostReport.Stage> stages = new ArrayList<>();
+        stages.add(new CostReport.Stage(
+                "graph (" + origin.description() + ")",
+                origin.program().program().count()));
+        stages.add(new CostReport.Stage("resubstitution", program.count()));
+        if (options.fma()) {
+            program = FusedOperations.of(program, DomainPoints.guard(definition, GUARD_POINTS));
+            stages.add(new CostReport.Stage("fused operations", program.count()));
+        }
+        if (shared) {
+            stages.add(new CostReport.Stage("shared trigonometry", program.countWithSharedTrigonometry()));
+        }
         KernelModel model = KernelModels.of(
-                definition, specification, origin.zero(), program.program(), DomainProgram.of(definition));
+                        definition, specification, origin.zero(), program, DomainProgram.of(definition))
+                .withSharedTrigonometry(shared);
         return new GeneratedClass(
                 specification, KernelEmitter.emit(model), KernelEmitter.functions(model), new CostReport(stages));
     }

@@ -41,6 +41,14 @@ public sealed interface Instruction {
         }
     }
 
+    /** a · b + c, rounded once; it counts as two operations. */
+    record MultiplyAdd(int left, int right, int addend) implements Instruction {
+        @Override
+        public List<Integer> operands() {
+            return List.of(left, right, addend);
+        }
+    }
+
     /** The negative of a value; it counts as no operation. */
     record Negation(int operand) implements Instruction {
         @Override
@@ -53,6 +61,11 @@ public sealed interface Instruction {
     record Call(RealFunction function, List<Integer> operands) implements Instruction {
         public Call {
             operands = List.copyOf(operands);
+        }
+
+        /** Whether it is a sine or a cosine. */
+        public boolean isCircular() {
+            return function == RealFunction.SIN || function == RealFunction.COS;
         }
     }
 

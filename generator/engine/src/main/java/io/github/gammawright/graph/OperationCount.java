@@ -5,7 +5,8 @@ import java.util.TreeMap;
 
 /**
  * How many operations one evaluation costs. Each binary + − × / on doubles counts 1 and an fma 2; negation, stores,
- * index arithmetic and work on parameters alone count 0; square roots and elementary functions are listed apart.
+ * index arithmetic and work on parameters alone count 0; square roots and elementary functions are listed apart. Where a
+ * class computes sine and cosine by itself, both of an argument together are listed as one {@code sincos}.
  *
  * @param additions sums and differences
  * @param multiplications products

@@ -39,6 +39,9 @@ public final class ProgramInterpreter {
                 case DIVIDE -> a / b;
             };
         }
+        if (instruction instanceof Instruction.MultiplyAdd fused) {
+            return Math.fma(values[fused.left()], values[fused.right()], values[fused.addend()]);
+        }
         Instruction.Call call = (Instruction.Call) instruction;
         double[] arguments = new double[call.operands().size()];
         for (int i = 0; i < arguments.length; i++) {

@@ -1,8 +1,10 @@
 package io.github.gammawright.graph;
 
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import java.util.TreeMap;
 
 /**
@@ -106,10 +108,31 @@ public final class StraightLineProgram {
                     case MULTIPLY -> multiplications++;
                     case DIVIDE -> divisions++;
                 }
+            } else if (instruction instanceof Instruction.MultiplyAdd) {
+                additions++;
+                multiplications++;
             } else if (instruction instanceof Instruction.Call call) {
                 functions.merge(call.function().symbol(), 1, Integer::sum);
             }
         }
         return new OperationCount(additions, multiplications, divisions, functions);
+    }
+
+    /** The same where sine and cosine are computed together: the two of one argument, or either, are one {@code sincos}. */
+    public OperationCount countWithSharedTrigonometry() {
+        Set<Integer> angles = new HashSet<>();
+        for (int i = 0; i < instructions.size(); i++) {
+            if (!parameterOnly[i] && instructions.get(i) instanceof Instruction.Call call && call.isCircular()) {
+                angles.add(call.operands().get(0));
+            }
+        }
+        OperationCount count = count();
+        Map<String, Integer> functions = new TreeMap<>(count.functions());
+        if (!angles.isEmpty()) {
+            functions.remove(RealFunction.SIN.symbol());
+            functions.remove(RealFunction.COS.symbol());
+            functions.put("sincos", angles.size());
+        }
+        return new OperationCount(count.additions(), count.multiplications(), count.divisions(), functions);
     }
 }

@@ -44,6 +44,9 @@ final class DoubleInterpreter {
                 case DIVIDE -> v[a.left()] / v[a.right()];
             };
         }
+        if (instruction instanceof Instruction.MultiplyAdd m) {
+            return Math.fma(v[m.left()], v[m.right()], v[m.addend()]);
+        }
         Instruction.Call call = (Instruction.Call) instruction;
         double x = v[call.operands().get(0)];
         double y = call.operands().size() > 1 ? v[call.operands().get(1)] : 0;

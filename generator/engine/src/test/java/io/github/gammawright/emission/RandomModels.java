@@ -3,6 +3,7 @@ package io.github.gammawright.emission;
 import io.github.gammawright.geometry.Layout;
 import io.github.gammawright.geometry.Quantity;
 import io.github.gammawright.geometry.Shape;
+import io.github.gammawright.graph.Instruction;
 import io.github.gammawright.graph.Instruction.Operator;
 import io.github.gammawright.graph.RealFunction;
 import io.github.gammawright.graph.Symbol;
@@ -86,7 +87,8 @@ final class RandomModels {
             case 8 -> program.call(RealFunction.POW, program.call(RealFunction.ABS, a), program.constant(1, 5));
             case 9, 10 -> program.divide(a, program.add(program.constant(5), factor));
             case 11 -> program.divide(a, b);
-            case 12, 13, 14 -> program.multiply(a, factor);
+            case 12, 13 -> program.multiply(a, factor);
+            case 14 -> program.append(new Instruction.MultiplyAdd(factor, program.call(RealFunction.TANH, a), b));
             case 15 -> program.arithmetic(Operator.MULTIPLY, factor, a);
             case 16, 17 -> program.subtract(a, b);
             default -> program.add(a, b);

@@ -1,13 +1,13 @@
 package io.github.gammawright.commandline;
 
 import io.github.gammawright.definition.MetricDefinition;
+import io.github.gammawright.generation.Applicability;
 import io.github.gammawright.generation.BuildPlan;
 import io.github.gammawright.generation.BuildSettings;
 import io.github.gammawright.generation.BuildSettings.Precedence;
 import io.github.gammawright.generation.CheckRun;
 import io.github.gammawright.generation.KernelSpecification;
 import io.github.gammawright.generation.Mistakes;
-import io.github.gammawright.generation.Splitting;
 import io.github.gammawright.geometry.Quantity;
 import io.github.gammawright.verification.CheckSettings;
 import io.github.gammawright.verification.KernelReport;
@@ -100,15 +100,13 @@ final class CheckCommand implements Callable<Integer> {
 
     /** All that the metric has; says what is left out. */
     private List<Quantity> quantities(MetricDefinition definition) {
-        List<Quantity> has = Splitting.quantities(definition);
+        List<Quantity> has = Applicability.quantities(definition);
         List<String> others = Arrays.stream(Quantity.values())
                 .filter(quantity -> !has.contains(quantity))
                 .map(Quantity::symbol)
                 .toList();
         if (!json && !others.isEmpty()) {
-            terminal.out()
-                    .println(definition.name() + ": no 3+1 split by "
-                            + definition.coordinates().get(0) + ", so without " + String.join(", ", others));
+            terminal.out().println(definition.name() + ": the metric has no " + String.join(", ", others));
         }
         return has;
     }

@@ -156,6 +156,10 @@ public enum DiagnosticCode {
             "A metric is symmetric: correct one of the two."),
     METRIC_DEGENERATE(Subject.TEXT, "{0} is zero, so the metric is degenerate", ""),
     METRIC_NOT_SPLIT(Subject.TEXT, "'{0}' needs a 3+1 split by the first coordinate '{1}', but {2}", "{3}"),
+    METRIC_WITHOUT_FRAME(
+            Subject.TEXT,
+            "no orthonormal frame was found for the whole domain, since every coordinate direction is null somewhere",
+            "Give the metric as a coframe, or restrict the domain."),
     CONSTANTS_TOO_COSTLY(
             Subject.TEXT,
             "the constant expressions of this definition call more than {0} functions",

@@ -4,6 +4,7 @@ import io.github.gammawright.algebra.AlgebraBudget;
 import io.github.gammawright.algebra.FormStyle;
 import io.github.gammawright.algebra.NormalForms;
 import io.github.gammawright.definition.MetricDefinition;
+import io.github.gammawright.geometry.FramePlan;
 import io.github.gammawright.geometry.Geometry;
 import io.github.gammawright.geometry.MetricGraph;
 import io.github.gammawright.geometry.MetricGraphBuilder;
@@ -31,9 +32,14 @@ record Candidate(String description, List<List<Boolean>> zero, LoweredProgram pr
     private static final int MOST_CLOSED_FORMS = 48;
 
     /** Along a route, and for the first route also in closed form, where the algebra finds one in its budget. */
-    static List<Candidate> of(MetricDefinition definition, List<Quantity> quantities, Route route, boolean closed) {
+    static List<Candidate> of(
+            MetricDefinition definition,
+            List<Quantity> quantities,
+            Route route,
+            Optional<FramePlan> framePlan,
+            boolean closed) {
         MetricGraph metric = MetricGraphBuilder.build(definition);
-        Geometry geometry = new Geometry(metric, route);
+        Geometry geometry = new Geometry(metric, route, framePlan);
         List<Node> all = new ArrayList<>();
         List<List<Boolean>> zero = new ArrayList<>();
         for (Quantity quantity : quantities) {

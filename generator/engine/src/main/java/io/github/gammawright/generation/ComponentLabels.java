@@ -33,6 +33,8 @@ final class ComponentLabels {
             case GEODESIC_ACCELERATION -> rate("u" + upper(tuple[0]));
             case HAMILTONIAN_FLOW ->
                 tuple[0] < names.size() ? rate(names.get(tuple[0])) : rate("p" + lower(tuple[0] - names.size()));
+            case ORTHONORMAL_FRAME -> "e" + legs(tuple[0]) + upper(tuple[1]);
+            case ROTATION_COEFFICIENTS -> smallGamma() + legs(tuple);
             case STRESS_SOURCE ->
                 (latex ? "\\tfrac{1}{2} \\sqrt{|g|} " : "½ √|g| ") + partial(tuple[0]) + " g"
                         + lower(tuple[1], tuple[2]);
@@ -54,6 +56,12 @@ final class ComponentLabels {
     /** Spatial indices as numbers of coordinates. */
     private static int[] space(int... tuple) {
         return Arrays.stream(tuple).map(i -> i + 1).toArray();
+    }
+
+    /** Legs of a frame are numbered. */
+    private String legs(int... legs) {
+        String numbers = Arrays.stream(legs).mapToObj(leg -> "(" + leg + ")").collect(Collectors.joining());
+        return latex ? "_{" + numbers + "}" : "_" + numbers;
     }
 
     private String alpha() {

@@ -37,10 +37,10 @@ public final class FormulaView {
     }
 
     private static List<String> build(MetricDefinition definition, Quantity quantity, FormulaPrinter.Form form) {
-        Splitting.require(definition, List.of(quantity));
+        Applicability.require(definition, List.of(quantity));
         MetricGraph metric = MetricGraphBuilder.build(definition);
         Route route = Route.candidates(metric, List.of(quantity)).get(0);
-        Geometry geometry = new Geometry(metric, route);
+        Geometry geometry = new Geometry(metric, route, Applicability.framePlan(definition, List.of(quantity)));
         List<Node> components = geometry.components(quantity);
         NormalForms forms = new NormalForms(metric.graph(), FormStyle.READABLE);
         ExpressionGraph graph = forms.target();

@@ -5,6 +5,7 @@ import io.github.gammawright.emission.KernelEmitter;
 import io.github.gammawright.emission.KernelModel;
 import io.github.gammawright.geometry.DomainPoints;
 import io.github.gammawright.geometry.DomainProgram;
+import io.github.gammawright.geometry.FramePlan;
 import io.github.gammawright.geometry.MetricGraphBuilder;
 import io.github.gammawright.geometry.Route;
 import io.github.gammawright.graph.StraightLineProgram;
@@ -12,6 +13,7 @@ import io.github.gammawright.optimiser.FusedOperations;
 import io.github.gammawright.optimiser.Optimiser;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 
 /** The way from a definition to a kernel class. */
 public final class KernelGenerator {
@@ -29,10 +31,12 @@ public final class KernelGenerator {
     }
 
     private static GeneratedClass make(MetricDefinition definition, KernelSpecification specification) {
-        Splitting.require(definition, specification.quantities());
+        Applicability.require(definition, specification.quantities());
+        Optional<FramePlan> framePlan = Applicability.framePlan(definition, specification.quantities());
         List<Candidate> candidates = new ArrayList<>();
         for (Route route : Route.candidates(MetricGraphBuilder.build(definition), specification.quantities())) {
-            candidates.addAll(Candidate.of(definition, specification.quantities(), route, candidates.isEmpty()));
+            candidates.addAll(
+                    Candidate.of(definition, specification.quantities(), route, framePlan, candidates.isEmpty()));
         }
         Optimiser optimiser = new Optimiser(
                 DomainPoints.guard(definition, GUARD_POINTS),

@@ -7,6 +7,7 @@ import io.github.gammawright.diagnostic.DiagnosticCode;
 import io.github.gammawright.diagnostic.Diagnostics;
 import io.github.gammawright.diagnostic.SourcePosition;
 import io.github.gammawright.geometry.DegenerateMetricException;
+import io.github.gammawright.geometry.NoFrameException;
 import io.github.gammawright.geometry.UndefinedValueException;
 import java.util.function.Supplier;
 
@@ -25,6 +26,8 @@ final class MetricMistakes {
         } catch (DegenerateMetricException e) {
             diagnostics.report(
                     DiagnosticCode.METRIC_DEGENERATE, position(definition.form()), "the determinant of the metric");
+        } catch (NoFrameException e) {
+            diagnostics.report(DiagnosticCode.METRIC_WITHOUT_FRAME, position(definition.form()));
         }
         diagnostics.throwIfAny();
         throw new IllegalStateException("a mistake without a message");

@@ -8,6 +8,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import org.hipparchus.fraction.BigFraction;
 
 /**
@@ -16,6 +17,7 @@ import org.hipparchus.fraction.BigFraction;
  */
 public final class Geometry {
 
+    private final Optional<FramePlan> framePlan;
     private final MetricGraph metric;
     private final Route route;
     private final ExpressionGraph graph;
@@ -26,9 +28,16 @@ public final class Geometry {
     private Node[][][] firstKind;
     private Node[][][] christoffel;
     private Slicing slicing;
+    private Frame frame;
 
     /** The geometry of a metric, along a route. */
     public Geometry(MetricGraph metric, Route route) {
+        this(metric, route, Optional.empty());
+    }
+
+    /** The same, with a plan for the orthonormal frame; without one it follows from the few points of the graph. */
+    public Geometry(MetricGraph metric, Route route, Optional<FramePlan> framePlan) {
+        this.framePlan = framePlan;
         this.metric = metric;
         this.route = route;
         this.graph = metric.graph();
@@ -50,6 +59,8 @@ public final class Geometry {
             case CONTRACTED_CHRISTOFFEL -> components.addAll(contracted());
             case GEODESIC_ACCELERATION -> components.addAll(geodesicAcceleration());
             case HAMILTONIAN_FLOW -> components.addAll(hamiltonianFlow());
+            case ORTHONORMAL_FRAME -> addMatrix(frame().vectors(), components);
+            case ROTATION_COEFFICIENTS -> components.addAll(RotationCoefficients.of(metric, frame()));
             case STRESS_SOURCE -> components.addAll(stressSource());
             case LAPSE,
                     SHIFT,
@@ -76,6 +87,13 @@ public final class Geometry {
         for (Node[][] matrix : tensor) {
             addMatrix(matrix, components);
         }
+    }
+
+    private Frame frame() {
+        if (frame == null) {
+            frame = Frame.of(metric, framePlan.orElseGet(() -> FramePlan.of(metric)));
+        }
+        return frame;
     }
 
     private Slicing slicing() {

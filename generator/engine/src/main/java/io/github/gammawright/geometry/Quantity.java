@@ -29,6 +29,10 @@ public enum Quantity {
     GEODESIC_ACCELERATION("−Γ^k_ij u^i u^j", List.of("velocity")),
     /** dx^i/dλ, then dp_i/dλ, of H = ½ g^ij p_i p_j. */
     HAMILTONIAN_FLOW("dx^i/dλ, dp_i/dλ", List.of("momentum")),
+    /** e_a^i with g(e_a, e_b) = ±δ_ab; a, i. The coframe's frame, or else the one of {@link FramePlan}. */
+    ORTHONORMAL_FRAME("e_a^i", List.of()),
+    /** γ_abc = g(e_a, ∇_c e_b), Ricci's rotation coefficients, −γ_bac; a, b, c: c is the direction of the derivative. */
+    ROTATION_COEFFICIENTS("γ_abc", List.of()),
     /** ½ √|g| ∂_k g_ij, to be multiplied with T^ij; k, i, j. */
     STRESS_SOURCE("½ √|g| ∂_k g_ij", List.of()),
     /** α = 1/√(−g^tt), t the first coordinate. */
@@ -110,11 +114,18 @@ public enum Quantity {
         };
     }
 
+    /** Whether the quantity needs an orthonormal frame, which not every metric has in the whole domain. */
+    public boolean isOfFrame() {
+        return this == ORTHONORMAL_FRAME || this == ROTATION_COEFFICIENTS;
+    }
+
     /** The index structure in n dimensions. */
     public Shape shape(int n) {
         return switch (this) {
             case METRIC, INVERSE_METRIC -> new Shape(List.of(n, n), 0, true);
             case VOLUME_ELEMENT -> new Shape(List.of(), 0, false);
+            case ORTHONORMAL_FRAME -> new Shape(List.of(n, n), 0, false);
+            case ROTATION_COEFFICIENTS -> new Shape(List.of(n, n, n), 0, false);
             case METRIC_DERIVATIVE, CHRISTOFFEL, CHRISTOFFEL_FIRST_KIND, STRESS_SOURCE ->
                 new Shape(List.of(n, n, n), 0, true);
             case CHRISTOFFEL_TRACE, CONTRACTED_CHRISTOFFEL, GEODESIC_ACCELERATION -> new Shape(List.of(n), 0, false);

@@ -11,7 +11,7 @@ import java.util.Optional;
  */
 public final class SplitCheck {
 
-    private static final int POINTS = 32;
+    private static final int POINTS = 256;
 
     /** Pivots closer to zero than this, relative to their row, may be rounding. */
     private static final double ROUNDING = 1e-9;

@@ -103,6 +103,13 @@ final class MetricSeries {
         return metric;
     }
 
+    /** ω^a_i; a, i. */
+    Taylor[][] oneForms(MetricForm.Coframe form) {
+        return form.oneForms().stream()
+                .map(oneForm -> evaluator.evaluate(oneForm).asLinearForm())
+                .toArray(Taylor[][]::new);
+    }
+
     private Taylor[][] coframe(MetricForm.Coframe form) {
         int n = definition.dimension();
         Taylor[][] metric = new Taylor[n][n];

@@ -25,6 +25,7 @@ public final class ReferenceEvaluator {
     private final MetricDefinition definition;
     private final int digits;
     private final RealFunctions functions;
+    private List<FrameOrder.Step> frameOrder;
     private final Map<BasisKey, TaylorBasis> bases = new ConcurrentHashMap<>();
 
     /** An evaluator in {@value #DEFAULT_DIGITS} digits. */
@@ -178,6 +179,14 @@ public final class ReferenceEvaluator {
             derivatives.add(derivative.value());
         }
         return List.copyOf(derivatives);
+    }
+
+    /** The order of the legs of orthonormal frames. */
+    synchronized List<FrameOrder.Step> frameOrder() {
+        if (frameOrder == null) {
+            frameOrder = FrameOrder.of(this);
+        }
+        return frameOrder;
     }
 
     /** Series in so many variables, the first of them the coordinates. */

@@ -1,6 +1,7 @@
 package io.github.gammawright.verification.reference;
 
 import io.github.gammawright.definition.MetricDefinition;
+import io.github.gammawright.definition.MetricForm;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
@@ -52,7 +53,7 @@ public final class ReferencePoint {
             vectors.add(constants(geometry.ring(), input));
         }
         List<Real> values = new ArrayList<>();
-        for (Taylor component : QuantityFormulas.components(quantity, geometry, vectors)) {
+        for (Taylor component : components(quantity, geometry, vectors, n, false)) {
             values.add(component.value());
         }
         return List.copyOf(values);
@@ -80,11 +81,31 @@ public final class ReferencePoint {
         }
         List<Real> values = new ArrayList<>();
         List<Real> limits = new ArrayList<>();
-        for (Taylor component : QuantityFormulas.components(quantity, geometry, vectors)) {
+        for (Taylor component : components(quantity, geometry, vectors, variables, true)) {
             values.add(component.value());
             limits.add(limit(component, all));
         }
         return new Conditioned(List.copyOf(values), List.copyOf(limits));
+    }
+
+    private Taylor[] components(
+            ReferenceQuantity quantity,
+            ReferenceGeometry geometry,
+            List<Taylor[]> vectors,
+            int variables,
+            boolean parametersVary) {
+        if (!quantity.isOfFrame()) {
+            return QuantityFormulas.components(quantity, geometry, vectors);
+        }
+        ReferenceFrame frame;
+        if (definition.form() instanceof MetricForm.Coframe form) {
+            Taylor[][] oneForms =
+                    series(variables, geometry.order(), parametersVary).oneForms(form);
+            frame = ReferenceFrame.ofCoframe(geometry, oneForms, form.signs());
+        } else {
+            frame = ReferenceFrame.ofDirections(geometry, evaluator.frameOrder());
+        }
+        return quantity == ReferenceQuantity.ORTHONORMAL_FRAME ? frame.vectors() : frame.rotationCoefficients();
     }
 
     private static Real limit(Taylor component, double[] variables) {

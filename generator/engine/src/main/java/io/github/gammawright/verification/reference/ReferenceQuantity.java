@@ -34,6 +34,10 @@ public enum ReferenceQuantity {
     RICCI_SCALAR(2, Indices.SCALAR),
     EINSTEIN(2, Indices.SYMMETRIC_2),
     KRETSCHMANN(2, Indices.SCALAR),
+    /** e_a^i; a, i. */
+    ORTHONORMAL_FRAME(0, Indices.MATRIX),
+    /** γ_abc = g(e_a, ∇_c e_b); a, b, c. */
+    ROTATION_COEFFICIENTS(1, Indices.TENSOR_3),
     LAPSE(0, Indices.SCALAR),
     SHIFT(0, Indices.SPATIAL_VECTOR),
     SPATIAL_METRIC(0, Indices.SPATIAL_SYMMETRIC_2),
@@ -74,6 +78,11 @@ public enum ReferenceQuantity {
         return Optional.empty();
     }
 
+    /** Whether the quantity belongs to an orthonormal frame. */
+    boolean isOfFrame() {
+        return this == ORTHONORMAL_FRAME || this == ROTATION_COEFFICIENTS;
+    }
+
     /** How many derivatives of the metric the quantity needs. */
     int metricOrder() {
         return metricOrder;
@@ -84,8 +93,8 @@ public enum ReferenceQuantity {
         return switch (indices) {
             case SCALAR -> List.of();
             case VECTOR -> List.of(n);
-            case SYMMETRIC_2 -> List.of(n, n);
-            case SYMMETRIC_3 -> List.of(n, n, n);
+            case SYMMETRIC_2, MATRIX -> List.of(n, n);
+            case SYMMETRIC_3, TENSOR_3 -> List.of(n, n, n);
             case SYMMETRIC_4, CURVATURE -> List.of(n, n, n, n);
             case PHASE -> List.of(2 * n);
             case SPATIAL_VECTOR -> List.of(n - 1);
@@ -130,6 +139,8 @@ public enum ReferenceQuantity {
     private enum Indices {
         SCALAR(false),
         VECTOR(false),
+        MATRIX(false),
+        TENSOR_3(false),
         SYMMETRIC_2(true),
         SYMMETRIC_3(true),
         SYMMETRIC_4(true),

@@ -1,26 +1,52 @@
 package io.github.gammawright.generation;
 
 import io.github.gammawright.definition.MetricDefinition;
+import io.github.gammawright.definition.MetricForm;
 import io.github.gammawright.diagnostic.DiagnosticCode;
 import io.github.gammawright.diagnostic.Diagnostics;
+import io.github.gammawright.geometry.FramePlan;
+import io.github.gammawright.geometry.NoFrameException;
 import io.github.gammawright.geometry.Quantity;
 import io.github.gammawright.geometry.SplitCheck;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 
-/** Refuses the quantities of the 3+1 split for a metric that does not allow it. */
-public final class Splitting {
+/** Tells which quantities a metric has: not each can be split into space and time, or has a frame in its whole domain. */
+public final class Applicability {
 
-    private Splitting() {}
+    private Applicability() {}
 
-    /** The quantities that a definition's metric has: all, or all but those of the 3+1 split. */
+    /** The quantities that a definition's metric has. */
     public static List<Quantity> quantities(MetricDefinition definition) {
-        boolean split = MetricMistakes.reported(definition, () -> SplitCheck.of(definition))
-                .isEmpty();
-        return Arrays.stream(Quantity.values())
-                .filter(quantity -> split || !quantity.isOfSplit())
-                .toList();
+        return MetricMistakes.reported(definition, () -> {
+            boolean split = SplitCheck.of(definition).isEmpty();
+            boolean frame = hasFrame(definition);
+            return Arrays.stream(Quantity.values())
+                    .filter(quantity -> split || !quantity.isOfSplit())
+                    .filter(quantity -> frame || !quantity.isOfFrame())
+                    .toList();
+        });
+    }
+
+    private static boolean hasFrame(MetricDefinition definition) {
+        try {
+            framePlan(definition, List.of(Quantity.ORTHONORMAL_FRAME));
+            return true;
+        } catch (NoFrameException e) {
+            return false;
+        }
+    }
+
+    /**
+     * The plan for the frame that the quantities need; none where they need none or the author gives one.
+     *
+     * @throws NoFrameException where there is none for the whole domain
+     */
+    static Optional<FramePlan> framePlan(MetricDefinition definition, List<Quantity> quantities) {
+        boolean needed =
+                quantities.stream().anyMatch(Quantity::isOfFrame) && !(definition.form() instanceof MetricForm.Coframe);
+        return needed ? Optional.of(FramePlan.of(definition)) : Optional.empty();
     }
 
     /**

@@ -5,14 +5,17 @@ import io.github.gammawright.algebra.FormStyle;
 import io.github.gammawright.algebra.NormalForms;
 import io.github.gammawright.definition.MetricDefinition;
 import io.github.gammawright.geometry.FramePlan;
+import io.github.gammawright.geometry.DomainSigns;
 import io.github.gammawright.geometry.Geometry;
 import io.github.gammawright.geometry.MetricGraph;
 import io.github.gammawright.geometry.MetricGraphBuilder;
 import io.github.gammawright.geometry.Quantity;
 import io.github.gammawright.geometry.Route;
+import io.github.gammawright.geometry.VolumeElement;
 import io.github.gammawright.graph.LoweredProgram;
 import io.github.gammawright.graph.Lowering;
 import io.github.gammawright.graph.Node;
+import io.github.gammawright.graph.Transfer;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
@@ -40,6 +43,9 @@ record Candidate(String description, List<List<Boolean>> zero, LoweredProgram pr
             boolean closed) {
         MetricGraph metric = MetricGraphBuilder.build(definition);
         Geometry geometry = new Geometry(metric, route, framePlan);
+        if (quantities.contains(Quantity.VOLUME_ELEMENT) || quantities.contains(Quantity.STRESS_SOURCE)) {
+            shortVolumeElement(definition, metric, geometry).ifPresent(geometry::useVolumeElement);
+        }
         List<Node> all = new ArrayList<>();
         List<List<Boolean>> zero = new ArrayList<>();
         for (Quantity quantity : quantities) {
@@ -53,6 +59,15 @@ record Candidate(String description, List<List<Boolean>> zero, LoweredProgram pr
             closedForms(metric, all).ifPresent(program -> candidates.add(new Candidate("closed forms", zero, program)));
         }
         return candidates;
+    }
+
+    /** √|det g| from the factors of the determinant, so that squares lose their root. */
+    private static Optional<Node> shortVolumeElement(
+            MetricDefinition definition, MetricGraph metric, Geometry geometry) {
+        NormalForms forms = new NormalForms(metric.graph(), FormStyle.CHEAP, AlgebraBudget.quick());
+        return forms.factored(geometry.determinant())
+                .map(factors -> VolumeElement.of(forms.target(), factors, new DomainSigns(definition)))
+                .map(element -> new Transfer(forms.target(), metric.graph()).copy(element));
     }
 
     private static Optional<LoweredProgram> closedForms(MetricGraph metric, List<Node> components) {

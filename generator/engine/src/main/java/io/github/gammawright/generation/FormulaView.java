@@ -3,6 +3,7 @@ package io.github.gammawright.generation;
 import io.github.gammawright.algebra.FormStyle;
 import io.github.gammawright.algebra.NormalForms;
 import io.github.gammawright.definition.MetricDefinition;
+import io.github.gammawright.geometry.DomainSigns;
 import io.github.gammawright.geometry.Geometry;
 import io.github.gammawright.geometry.MetricGraph;
 import io.github.gammawright.geometry.MetricGraphBuilder;
@@ -52,7 +53,7 @@ public final class FormulaView {
             Node component = components.get(shape.fullIndex(tuple));
             if (!component.isZero()) {
                 Node readable = quantity == Quantity.VOLUME_ELEMENT
-                        ? VolumeElement.of(graph, readable(forms, geometry.determinant()))
+                        ? VolumeElement.of(graph, readable(forms, geometry.determinant()), new DomainSigns(definition))
                         : known.computeIfAbsent(component, c -> readable(forms, c));
                 values.put(labels.label(asWritten(shape, tuple)), readable);
             }

@@ -1,6 +1,8 @@
 package io.github.gammawright.generation;
 
+import io.github.gammawright.catalogue.Catalogue;
 import io.github.gammawright.definition.MetricDefinition;
+import io.github.gammawright.diagnostic.SourceText;
 import io.github.gammawright.emission.KernelModel;
 import io.github.gammawright.geometry.DomainProgram;
 import io.github.gammawright.geometry.Layout;
@@ -81,8 +83,9 @@ final class KernelModels {
     /** The command that makes the class again, the options that differ from what is used without them included. */
     private static String command(MetricDefinition definition, KernelSpecification specification) {
         StringBuilder command = new StringBuilder("gammawright generate ");
-        command.append(definition.name()).append(" --out DIR");
-        command.append(" --package ").append(specification.packageName());
+        command.append(argument(definition)).append(" --out DIR");
+        command.append(" --package ")
+                .append(specification.packageName().isEmpty() ? "''" : specification.packageName());
         command.append(" --class ").append(specification.className());
         command.append(" --quantity ");
         command.append(String.join(
@@ -104,5 +107,22 @@ final class KernelModels {
             command.append(" --prefer ").append(options.prefer().symbol());
         }
         return command.toString();
+    }
+
+    /** The name of a built-in definition; else the file's, without its folder, which another machine may not have. */
+    private static String argument(MetricDefinition definition) {
+        boolean builtIn = Catalogue.standard()
+                .find(definition.name())
+                .map(SourceText::text)
+                .filter(definition.source().text()::equals)
+                .isPresent();
+        if (builtIn) {
+            return definition.name();
+        }
+        String path = definition.source().name();
+        String file = path.substring(Math.max(path.lastIndexOf('/'), path.lastIndexOf('\\')) + 1);
+        return file.codePoints().allMatch(c -> Character.isLetterOrDigit(c) || "._-+".indexOf(c) >= 0)
+                ? file
+                : "'" + file.replace("'", "'\\''") + "'";
     }
 }

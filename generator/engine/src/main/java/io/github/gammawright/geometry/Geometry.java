@@ -21,6 +21,7 @@ public final class Geometry {
     private final MetricGraph metric;
     private final Route route;
     private final ExpressionGraph graph;
+    private Node volumeElement;
     private final Differentiation differentiation;
     private final int n;
     private InverseMetric inverse;
@@ -51,7 +52,7 @@ public final class Geometry {
         switch (quantity) {
             case METRIC -> addMatrix(metric.components(), components);
             case INVERSE_METRIC -> addMatrix(inverse().components(), components);
-            case VOLUME_ELEMENT -> components.add(VolumeElement.of(graph, determinant()));
+            case VOLUME_ELEMENT -> components.add(volumeElement());
             case METRIC_DERIVATIVE -> addTensor(metricDerivative(), components);
             case CHRISTOFFEL -> addTensor(christoffel(), components);
             case CHRISTOFFEL_FIRST_KIND -> addTensor(firstKind(), components);
@@ -177,6 +178,19 @@ public final class Geometry {
         return inverse().determinant();
     }
 
+    /** √|det g|, in the form that was {@link #useVolumeElement given} if one was. */
+    private Node volumeElement() {
+        if (volumeElement == null) {
+            volumeElement = VolumeElement.of(graph, determinant());
+        }
+        return volumeElement;
+    }
+
+    /** Sets how √|det g| is computed, to be called before any components are asked for. */
+    public void useVolumeElement(Node form) {
+        volumeElement = form;
+    }
+
     /** Γ^m_mk = ½ g^ij ∂_k g_ij. */
     private List<Node> trace() {
         Node[][] g = inverse().components();
@@ -215,7 +229,7 @@ public final class Geometry {
 
     /** ½ √|g| ∂_k g_ij. */
     private List<Node> stressSource() {
-        Node half = graph.multiple(BigFraction.ONE_HALF, VolumeElement.of(graph, determinant()));
+        Node half = graph.multiple(BigFraction.ONE_HALF, volumeElement());
         graph.keep(half);
         List<Node> source = new ArrayList<>();
         for (Node[][] matrix : metricDerivative()) {

@@ -7,8 +7,13 @@ import java.util.List;
 import java.util.Map;
 import org.hipparchus.fraction.BigFraction;
 
-/** Appends instructions one by one; an instruction that is there already is not repeated. */
+/**
+ * Appends instructions one by one; an instruction that is there already is not repeated, and numbers are combined exactly.
+ */
 public final class ProgramBuilder {
+
+    /** Rational numbers of more bits than this are combined at run time. */
+    private static final int LARGEST_FOLDED = 2_000;
 
     private final List<Instruction> instructions = new ArrayList<>();
     private final Map<Instruction, Integer> known = new HashMap<>();
@@ -61,7 +66,41 @@ public final class ProgramBuilder {
     }
 
     private int arithmetic(Instruction.Operator operator, int a, int b) {
+        if (instructions.get(a) instanceof Instruction.Constant x
+                && instructions.get(b) instanceof Instruction.Constant y
+                && isFoldable(operator, x.value(), y.value())) {
+            return constant(fold(operator, x.value(), y.value()));
+        }
+        if (operator == Instruction.Operator.MULTIPLY && isOne(a)) {
+            return b;
+        }
+        if ((operator == Instruction.Operator.MULTIPLY || operator == Instruction.Operator.DIVIDE) && isOne(b)) {
+            return a;
+        }
         return append(new Instruction.Arithmetic(operator, a, b));
+    }
+
+    private boolean isOne(int number) {
+        return instructions.get(number) instanceof Instruction.Constant constant
+                && constant.value().equals(BigFraction.ONE);
+    }
+
+    private static boolean isFoldable(Instruction.Operator operator, BigFraction a, BigFraction b) {
+        boolean divisionByZero = operator == Instruction.Operator.DIVIDE && b.signum() == 0;
+        return !divisionByZero && bits(a) + bits(b) <= LARGEST_FOLDED;
+    }
+
+    private static int bits(BigFraction value) {
+        return value.getNumerator().bitLength() + value.getDenominator().bitLength();
+    }
+
+    private static BigFraction fold(Instruction.Operator operator, BigFraction a, BigFraction b) {
+        return switch (operator) {
+            case ADD -> a.add(b);
+            case SUBTRACT -> a.subtract(b);
+            case MULTIPLY -> a.multiply(b);
+            case DIVIDE -> a.divide(b);
+        };
     }
 
     /** Gives a value a name, unless it has one. */

@@ -211,8 +211,14 @@ final class NetworkWriter {
         }
         int result;
         if (instruction instanceof Instruction.Arithmetic arithmetic) {
-            result =
-                    builder.append(new Instruction.Arithmetic(arithmetic.operator(), operands.get(0), operands.get(1)));
+            int a = operands.get(0);
+            int b = operands.get(1);
+            result = switch (arithmetic.operator()) {
+                case ADD -> builder.add(a, b);
+                case SUBTRACT -> builder.subtract(a, b);
+                case MULTIPLY -> builder.multiply(a, b);
+                case DIVIDE -> builder.divide(a, b);
+            };
         } else if (instruction instanceof Instruction.Negation) {
             result = builder.negate(operands.get(0));
         } else if (instruction instanceof Instruction.Call call) {

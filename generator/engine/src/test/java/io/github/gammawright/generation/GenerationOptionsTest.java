@@ -114,4 +114,39 @@ class GenerationOptionsTest {
         assertThat(calls).isPositive();
         assertThat(generated.source()).contains("Math.sqrt(");
     }
+
+    /** Σ sin θ; Boyer &amp; Lindquist (1967), as every textbook gives it. */
+    @Test
+    void volumeElementOfKerrHasNoRoot() {
+        MetricDefinition definition = builtIn("kerr");
+        GeneratedClass generated = generate(definition, Trigonometry.MATH, false, Quantity.VOLUME_ELEMENT);
+        assertThat(generated.cost().emitted().functions().keySet()).containsExactly("cos", "sin");
+        assertThat(generated.cost().emitted().operations()).isLessThanOrEqualTo(5);
+        assertThat(FormulaView.lines(definition, Quantity.VOLUME_ELEMENT, FormulaPrinter.Form.TEXT))
+                .anyMatch(line -> line.contains("sin(theta)"))
+                .noneMatch(line -> line.contains("abs(") || line.contains("sqrt("));
+    }
+
+    @Test
+    void theCommandThatMakesAClassAgainNamesTheUsersFile() {
+        String text = """
+                name = "ember"
+                coordinates = ["x", "y"]
+                line-element = "dx^2 + x^2*dy^2"
+                """;
+        assertThat(source(new SourceText("/home/ada/metrics/embers.metric.toml", text)))
+                .contains("gammawright generate embers.metric.toml --out DIR");
+        assertThat(source(new SourceText("my embers.metric.toml", text)))
+                .contains("gammawright generate 'my embers.metric.toml' --out DIR");
+        assertThat(generate(builtIn("schwarzschild"), Trigonometry.SHARED, true, Quantity.METRIC)
+                        .source())
+                .contains("gammawright generate schwarzschild --out DIR")
+                .contains("--trigonometry shared --fma");
+    }
+
+    private static String source(SourceText text) {
+        return generate(DefinitionReader.read(text), Trigonometry.MATH, false, Quantity.METRIC)
+                .source()
+                .replace("\n * ", " ");
+    }
 }

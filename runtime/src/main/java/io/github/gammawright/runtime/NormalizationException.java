@@ -5,7 +5,8 @@ public final class NormalizationException extends IllegalArgumentException {
 
     private static final long serialVersionUID = 1L;
 
-    NormalizationException(String message) {
+    /** Takes the text that says where, and what is wrong. */
+    public NormalizationException(String message) {
         super(message);
     }
 }

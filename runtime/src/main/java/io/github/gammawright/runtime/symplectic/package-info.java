@@ -1,0 +1,2 @@
+/** Integrators that keep the structure of Hamilton's equations. */
+package io.github.gammawright.runtime.symplectic;

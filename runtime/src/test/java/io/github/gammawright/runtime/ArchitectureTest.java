@@ -18,27 +18,49 @@ class ArchitectureTest {
     static final ArchRule needsHipparchusAlone = classes()
             .should()
             .onlyDependOnClassesThat()
-            .resideInAnyPackage(ROOT + "..", "org.hipparchus..", "java.lang..", "java.util..", "java.io..", "java.nio..",
+            .resideInAnyPackage(
+                    ROOT + "..",
+                    "org.hipparchus..",
+                    "java.lang..",
+                    "java.util..",
+                    "java.io..",
+                    "java.nio..",
                     "java.math..");
 
     /** Each package may use the root and what is named beside it. */
     @ArchTest
     static final ArchRule packagesDependOneWay = layeredArchitecture()
             .consideringOnlyDependenciesInLayers()
-            .layer("kernels").definedBy(ROOT)
-            .layer("frame").definedBy(ROOT + ".frame")
-            .layer("conserved").definedBy(ROOT + ".conserved")
-            .layer("symplectic").definedBy(ROOT + ".symplectic")
-            .layer("orbit").definedBy(ROOT + ".orbit")
-            .layer("chart").definedBy(ROOT + ".chart")
-            .layer("swarm").definedBy(ROOT + ".swarm")
-            .layer("output").definedBy(ROOT + ".output")
-            .whereLayer("kernels").mayNotAccessAnyLayer()
-            .whereLayer("frame").mayOnlyAccessLayers("kernels")
-            .whereLayer("conserved").mayOnlyAccessLayers("kernels")
-            .whereLayer("symplectic").mayOnlyAccessLayers("kernels")
-            .whereLayer("orbit").mayOnlyAccessLayers("kernels", "conserved")
-            .whereLayer("chart").mayOnlyAccessLayers("kernels", "orbit")
-            .whereLayer("swarm").mayOnlyAccessLayers("kernels", "orbit")
-            .whereLayer("output").mayOnlyAccessLayers("orbit");
+            .layer("kernels")
+            .definedBy(ROOT)
+            .layer("frame")
+            .definedBy(ROOT + ".frame")
+            .layer("conserved")
+            .definedBy(ROOT + ".conserved")
+            .layer("symplectic")
+            .definedBy(ROOT + ".symplectic")
+            .layer("orbit")
+            .definedBy(ROOT + ".orbit")
+            .layer("chart")
+            .definedBy(ROOT + ".chart")
+            .layer("swarm")
+            .definedBy(ROOT + ".swarm")
+            .layer("output")
+            .definedBy(ROOT + ".output")
+            .whereLayer("kernels")
+            .mayNotAccessAnyLayer()
+            .whereLayer("frame")
+            .mayOnlyAccessLayers("kernels")
+            .whereLayer("conserved")
+            .mayOnlyAccessLayers("kernels")
+            .whereLayer("symplectic")
+            .mayOnlyAccessLayers("kernels")
+            .whereLayer("orbit")
+            .mayOnlyAccessLayers("kernels", "conserved")
+            .whereLayer("chart")
+            .mayOnlyAccessLayers("kernels", "orbit")
+            .whereLayer("swarm")
+            .mayOnlyAccessLayers("kernels", "orbit")
+            .whereLayer("output")
+            .mayOnlyAccessLayers("orbit");
 }

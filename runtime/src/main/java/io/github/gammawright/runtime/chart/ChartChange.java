@@ -117,8 +117,8 @@ public final class ChartChange {
 
     private double[] state(double[] state, boolean covariant) {
         if (state.length < n || state.length % n != 0) {
-            throw new IllegalArgumentException("a state of " + state.length + " entries is not made of a point and vectors of "
-                    + n);
+            throw new IllegalArgumentException(
+                    "a state of " + state.length + " entries is not made of a point and vectors of " + n);
         }
         double[] point = Arrays.copyOf(state, n);
         double[] result = new double[state.length];

@@ -82,8 +82,8 @@ public final class Observers {
     public OrthonormalFrame frame(double[] point, double[] velocity, Handedness handedness, double[]... seeds) {
         int n = metric.dimension();
         if (seeds.length != n - 1) {
-            throw new IllegalArgumentException("a frame needs " + (n - 1) + " vectors besides the velocity, not "
-                    + seeds.length);
+            throw new IllegalArgumentException(
+                    "a frame needs " + (n - 1) + " vectors besides the velocity, not " + seeds.length);
         }
         double[][] e = new double[n][];
         e[0] = velocity.clone();

@@ -47,8 +47,11 @@ class KerrChartsTest {
 
     private static Spacetime kerrSchild(double a) {
         return new Spacetime(4, x -> {
-            DerivativeStructure half =
-                    x[1].square().add(x[2].square()).add(x[3].square()).subtract(a * a).divide(2);
+            DerivativeStructure half = x[1].square()
+                    .add(x[2].square())
+                    .add(x[3].square())
+                    .subtract(a * a)
+                    .divide(2);
             DerivativeStructure r2 =
                     half.add(half.square().add(x[3].square().multiply(a * a)).sqrt());
             DerivativeStructure r = r2.sqrt();
@@ -59,8 +62,9 @@ class KerrChartsTest {
                 r.multiply(x[2]).subtract(x[1].multiply(a)).divide(sum),
                 x[3].divide(r)
             };
-            DerivativeStructure twice =
-                    r2.multiply(r).multiply(2).divide(r2.square().add(x[3].square().multiply(a * a)));
+            DerivativeStructure twice = r2.multiply(r)
+                    .multiply(2)
+                    .divide(r2.square().add(x[3].square().multiply(a * a)));
             DerivativeStructure[][] g = new DerivativeStructure[4][4];
             for (int i = 0; i < 4; i++) {
                 for (int j = 0; j < 4; j++) {
@@ -192,13 +196,16 @@ class KerrChartsTest {
         KerrByHand kerr = new KerrByHand(a);
         HamiltonianEquation outer = new HamiltonianEquation(4, kerr::flow);
         HamiltonianEquation inner = new HamiltonianEquation(4, kerrSchild(a)::flow);
-        double[] start = {
-            0, 12, Math.PI / 2, 0, -0.9418161811457918, 0, Math.sqrt(2.128179922614577), 2.513146042747529
+        double[] start = {0, 12, Math.PI / 2, 0, -0.9418161811457918, 0, Math.sqrt(2.128179922614577), 2.513146042747529
         };
         double to = 30;
         double[] direct = new Run(outer).follow(0, start, to).state();
         ChartedRun.Arrival arrival = new ChartedRun()
-                .in("outer", new Run(outer).watch(Event.surface("in", 0, 10, Direction.INCREASING).stop()))
+                .in(
+                        "outer",
+                        new Run(outer)
+                                .watch(Event.surface("in", 0, 10, Direction.INCREASING)
+                                        .stop()))
                 .in("inner", new Run(inner).tolerancesFor(StateKind.LIGHT))
                 .change("outer", "in", "inner", charts.toKerrSchild()::momentumState)
                 .follow("outer", 0, start, to);

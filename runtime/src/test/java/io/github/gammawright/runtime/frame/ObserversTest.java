@@ -58,11 +58,13 @@ class ObserversTest {
         double[] u = observers.zeroAngularMomentumVelocity(point);
         u[1] += along * 0.1 * u[0];
         OrthonormalFrame frame = observers.frame(
-                point, u, handedness, new double[] {0, 1, 0, 0}, new double[] {0, along, 0, 1}, new double[] {0, 0, 1, 0});
+                point, u, handedness, new double[] {0, 1, 0, 0}, new double[] {0, along, 0, 1}, new double[] {0, 0, 1, 0
+                });
         for (int a = 0; a < 4; a++) {
             for (int b = 0; b < 4; b++) {
                 double expected = a != b ? 0 : a == 0 ? -1 : 1;
-                assertThat(metric.product(point, frame.vector(a), frame.vector(b))).isCloseTo(expected, within(1e-12));
+                assertThat(metric.product(point, frame.vector(a), frame.vector(b)))
+                        .isCloseTo(expected, within(1e-12));
             }
         }
         // The seeds e_φ, e_θ stand in the odd order, so that the last vector says which way it was turned.
@@ -96,7 +98,8 @@ class ObserversTest {
                 .hasMessageContaining("vector 3");
         assertThatThrownBy(() -> observers.frame(point, u, Handedness.RIGHT, v, w))
                 .hasMessageContaining("3 vectors besides the velocity, not 2");
-        assertThatThrownBy(() -> observers.frame(point, v, Handedness.RIGHT)).isInstanceOf(NormalizationException.class);
+        assertThatThrownBy(() -> observers.frame(point, v, Handedness.RIGHT))
+                .isInstanceOf(NormalizationException.class);
     }
 
     /**

@@ -113,14 +113,20 @@ class RunTest {
     void crossingsAreCountedByDirection() {
         KerrByHand kerr = new KerrByHand(0.9);
         HamiltonianEquation tilted = new HamiltonianEquation(4, kerr::flow);
-        double[] start = {0, 4, Math.PI / 2, 0, -0.9418161811457918, 0, Math.sqrt(2.128179922614577), 2.513146042747529};
+        double[] start = {0, 4, Math.PI / 2, 0, -0.9418161811457918, 0, Math.sqrt(2.128179922614577), 2.513146042747529
+        };
         Event up = Event.surface("up", 2, Math.PI / 2, Direction.DECREASING);
         Event down = Event.surface("down", 2, Math.PI / 2, Direction.INCREASING);
         Event both = Event.surface("both", 2, Math.PI / 2, Direction.BOTH);
         Event nearest = Event.closestApproach("nearest", 1);
         Event farthest = Event.farthestPoint("farthest", 1);
         Ending there = new Run(tilted)
-                .watch(up).watch(down).watch(both).watch(nearest).watch(farthest).follow(0, start, 2000);
+                .watch(up)
+                .watch(down)
+                .watch(both)
+                .watch(nearest)
+                .watch(farthest)
+                .follow(0, start, 2000);
         assertThat(there.completed()).isTrue();
         assertThat(both.count()).isEqualTo(up.count() + down.count()).isGreaterThan(5);
         assertThat(Math.abs(up.count() - down.count())).isLessThanOrEqualTo(1);
@@ -141,7 +147,8 @@ class RunTest {
         ConservedQuantity carter = ConservedQuantity.ofMomentum("Carter", 4, KerrConstants.carter(0.9, 1));
         KerrByHand kerr = new KerrByHand(0.9);
         HamiltonianEquation tilted = new HamiltonianEquation(4, kerr::flow);
-        double[] start = {0, 4, Math.PI / 2, 0, -0.9418161811457918, 0, Math.sqrt(2.128179922614577), 2.513146042747529};
+        double[] start = {0, 4, Math.PI / 2, 0, -0.9418161811457918, 0, Math.sqrt(2.128179922614577), 2.513146042747529
+        };
         DriftMonitor strict = new DriftMonitor(1e-9, carter);
         Ending coarse = new Run(tilted)
                 .integrator(IntegratorFactory.tolerances(1e-4, 1e-4))
@@ -190,7 +197,8 @@ class RunTest {
                 .integrator((smallest, largest) -> new AdamsMoultonIntegrator(6, smallest, largest, 1e-12, 1e-12))
                 .follow(0, start, 300);
         assertThat(byAdams.state()[1]).isCloseTo(byDefault.state()[1], within(1e-7));
-        Ending light = new Run(equation).tolerancesFor(StateKind.LIGHT).maximalStep(1).follow(0, start, 300);
+        Ending light =
+                new Run(equation).tolerancesFor(StateKind.LIGHT).maximalStep(1).follow(0, start, 300);
         assertThat(light.evaluations()).isGreaterThan(300 * 11);
     }
 
@@ -218,7 +226,8 @@ class RunTest {
     @Test
     void wrongInputIsRefused() {
         double[] start = bound(10, 0.25);
-        assertThatThrownBy(() -> new Run(equation).follow(0, new double[7], 1)).hasMessageContaining("8 entries, not 7");
+        assertThatThrownBy(() -> new Run(equation).follow(0, new double[7], 1))
+                .hasMessageContaining("8 entries, not 7");
         assertThatThrownBy(() -> new Run(equation).within(x -> x[1] > 50).follow(0, start, 1))
                 .hasMessageContaining("outside the domain");
         double[] bad = start.clone();
@@ -228,7 +237,8 @@ class RunTest {
         assertThatThrownBy(() -> new Run(equation).recordSamples(-1, (parameter, state) -> {}))
                 .hasMessageContaining("interval");
         assertThatThrownBy(() -> new Run(equation).eventTolerance(0)).hasMessageContaining("tolerance");
-        assertThatThrownBy(() -> Event.where("x", StateFunction.entry(0), Direction.BOTH).stopAfter(0))
+        assertThatThrownBy(() ->
+                        Event.where("x", StateFunction.entry(0), Direction.BOTH).stopAfter(0))
                 .hasMessageContaining("after 0 times");
     }
 }

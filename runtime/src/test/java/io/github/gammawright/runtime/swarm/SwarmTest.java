@@ -95,7 +95,8 @@ class SwarmTest {
             double[] state = new double[8];
             light(b, state);
             Event sky = Event.surface("sky", 1, 60, Direction.INCREASING).stop();
-            Ending exact = new Run(new HamiltonianEquation(4, kerr::flow)).watch(sky).follow(0, state, 1000);
+            Ending exact =
+                    new Run(new HamiltonianEquation(4, kerr::flow)).watch(sky).follow(0, state, 1000);
             assertThat(tracer.trace(0, state, 1000, 0.1)).isEqualTo(Outcome.EVENT);
             assertThat(tracer.parameter()).isCloseTo(exact.parameter(), within(1e-6));
             assertThat(state[1]).isCloseTo(60, within(1e-9));
@@ -121,8 +122,8 @@ class SwarmTest {
         assertThat(bare.trace(0, state, 0, 0.1)).isEqualTo(Outcome.COMPLETED);
         assertThatThrownBy(() -> bare.trace(0, new double[8], 1, 0.1)).hasMessageContaining("outside the domain");
         // A disc with a hole in it: only the filter lets the ray end.
-        RayTracer disc = tracer()
-                .until("disc", (parameter, y) -> y[2] - Math.PI / 2, Direction.BOTH, y -> y[1] > 6 && y[1] < 20);
+        RayTracer disc = tracer().until(
+                        "disc", (parameter, y) -> y[2] - Math.PI / 2, Direction.BOTH, y -> y[1] > 6 && y[1] < 20);
         light(9, state);
         state[2] = 1.2;
         assertThat(disc.trace(0, state, 1000, 0.1)).isEqualTo(Outcome.EVENT);
@@ -250,7 +251,8 @@ class SwarmTest {
     void wrongSettingsAreRefused() {
         assertThatThrownBy(() -> new Swarm(8, 2, Task::new).threads(0)).hasMessageContaining("0 threads");
         assertThatThrownBy(() -> new Swarm(8, 2, Task::new).chunk(0)).hasMessageContaining("0 rays");
-        assertThatThrownBy(() -> new Swarm(8, 2, Task::new).follow(Integer.MAX_VALUE)).hasMessageContaining("fit");
+        assertThatThrownBy(() -> new Swarm(8, 2, Task::new).follow(Integer.MAX_VALUE))
+                .hasMessageContaining("fit");
         assertThat(new Swarm(8, 2, Task::new).follow(0).complete()).isTrue();
     }
 }

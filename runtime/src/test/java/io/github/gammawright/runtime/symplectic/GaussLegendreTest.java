@@ -16,18 +16,16 @@ import org.junit.jupiter.params.provider.ValueSource;
 class GaussLegendreTest {
 
     /** An oscillator as geodesics of no metric: q' = p, p' = −q. */
-    private static final CurveEquation OSCILLATOR =
-            new HamiltonianEquation(1, (x, p, result) -> {
-                result[0] = p[0];
-                result[1] = -x[0];
-            });
+    private static final CurveEquation OSCILLATOR = new HamiltonianEquation(1, (x, p, result) -> {
+        result[0] = p[0];
+        result[1] = -x[0];
+    });
 
     /** q'' = −sin q. */
-    private static final CurveEquation PENDULUM =
-            new HamiltonianEquation(1, (x, p, result) -> {
-                result[0] = p[0];
-                result[1] = -Math.sin(x[0]);
-            });
+    private static final CurveEquation PENDULUM = new HamiltonianEquation(1, (x, p, result) -> {
+        result[0] = p[0];
+        result[1] = -Math.sin(x[0]);
+    });
 
     private static double errorOfOscillator(int order, int steps) {
         GaussLegendre method = new GaussLegendre(OSCILLATOR, order, 2.0 / steps);

@@ -81,10 +81,10 @@ final class GuardedEquation implements OrdinaryDifferentialEquation {
     }
 
     private static boolean finite(double[] values) {
-        // The sum of differences is NaN as soon as one value is not finite.
+        // The sum of products is NaN as soon as one value is not finite.
         double sum = 0;
         for (double value : values) {
-            sum += value - value;
+            sum += 0 * value;
         }
         return sum == 0;
     }

@@ -218,7 +218,6 @@ public final class Run {
             integrator.addStepHandler(dense.stretch());
         }
         progress.left = false;
-        progress.integrator = integrator;
         try {
             integrator.integrate(guarded, new ODEState(progress.parameter, progress.state), to);
         } catch (GuardedEquation.LeftDomain gone) {
@@ -260,7 +259,6 @@ public final class Run {
         private boolean left;
         private boolean drifted;
         private double tried;
-        private ODEIntegrator integrator;
 
         Progress(double parameter, double[] state, boolean forward) {
             this.start = parameter;

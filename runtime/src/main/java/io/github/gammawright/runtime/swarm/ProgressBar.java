@@ -1,5 +1,6 @@
 package io.github.gammawright.runtime.swarm;
 
+import java.io.Console;
 import java.io.PrintStream;
 import java.util.Locale;
 import java.util.Objects;
@@ -21,7 +22,21 @@ public final class ProgressBar implements ProgressListener {
 
     /** A bar on standard error, or nothing where the program does not run on a terminal. */
     public static ProgressListener onTerminal(String label) {
-        return System.console() == null ? (done, total) -> {} : new ProgressBar(System.err, label);
+        return terminal() ? new ProgressBar(System.err, label) : (done, total) -> {};
+    }
+
+    /** From JDK 22 on there is a console in any case, which says itself whether it is a terminal. */
+    @SuppressWarnings("SystemConsoleNull")
+    private static boolean terminal() {
+        Console console = System.console();
+        if (console == null) {
+            return false;
+        }
+        try {
+            return (Boolean) Console.class.getMethod("isTerminal").invoke(console);
+        } catch (ReflectiveOperationException olderJdk) {
+            return true;
+        }
     }
 
     @Override

@@ -226,7 +226,7 @@ public final class RayTracer {
     private boolean accepts(double at, double[] state) {
         double sum = 0;
         for (double value : state) {
-            sum += value - value;
+            sum += 0 * value;
         }
         if (sum != 0) {
             return false;

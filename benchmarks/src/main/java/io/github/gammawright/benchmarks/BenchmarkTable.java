@@ -28,6 +28,8 @@ public final class BenchmarkTable {
 
     private static final Map<String, String> GEODESICS = Map.of(
             "denseContraction", "expert's 64 symbols, contracted term by term",
+            "expertAcceleration", "acceleration by an expert's hand",
+            "expertFlow", "Hamilton's equations by an expert's hand",
             "geodesicAcceleration", "generated `geodesic-acceleration`",
             "geodesicEquation", "the same through `GeodesicEquation`",
             "hamiltonianFlow", "generated `hamiltonian-flow`",
@@ -76,15 +78,11 @@ public final class BenchmarkTable {
         lines.add("| all Christoffel symbols of `kerr` at a point | operations | ns | worst error |");
         lines.add("| --- | --- | --- | --- |");
         for (Contender contender : Contender.all(KerrInputs.MASS, KerrInputs.SPIN)) {
-            String operations = contender
-                    .straightLine()
-                    .map(type -> Operations.of(type).description())
-                    .orElse("");
             lines.add(String.format(
                     Locale.ROOT,
                     "| %s | %s | %s | %.0e |",
                     contender.description(),
-                    operations,
+                    contender.operations(),
                     score(scores.get(contender.benchmark())),
                     accuracy.worstError(contender)));
         }
@@ -98,8 +96,10 @@ public final class BenchmarkTable {
         lines.add("| --- | --- |");
         for (String name : List.of(
                 "denseContraction",
+                "expertAcceleration",
                 "geodesicAcceleration",
                 "geodesicEquation",
+                "expertFlow",
                 "hamiltonianFlow",
                 "hamiltonianEquation")) {
             lines.add("| " + GEODESICS.get(name) + " | " + score(scores.get(name)) + " |");

@@ -5,6 +5,9 @@ import static io.github.gammawright.benchmarks.KerrInputs.SPIN;
 
 import io.github.gammawright.benchmarks.kernels.KerrFull;
 import io.github.gammawright.benchmarks.kernels.KerrNonZero;
+import io.github.gammawright.benchmarks.kernels.KerrSharedFull;
+import io.github.gammawright.benchmarks.kernels.KerrSharedNonZero;
+import io.github.gammawright.runtime.PointKernel;
 import java.util.concurrent.TimeUnit;
 import org.openjdk.jmh.annotations.Benchmark;
 import org.openjdk.jmh.annotations.BenchmarkMode;
@@ -32,6 +35,9 @@ public class ChristoffelBenchmark {
     private final ExpertFull expertFull = new ExpertFull(MASS, SPIN);
     private final KerrNonZero generatedNonZero = new KerrNonZero(MASS, SPIN);
     private final KerrFull generatedFull = new KerrFull(MASS, SPIN);
+    private final KerrSharedNonZero sharedNonZero = new KerrSharedNonZero(MASS, SPIN);
+    private final KerrSharedFull sharedFull = new KerrSharedFull(MASS, SPIN);
+    private final PointKernel graphAlone = GraphAlone.kernel(MASS, SPIN);
     private final NaiveEmission naive = new NaiveEmission(MASS, SPIN);
     private final FiniteDifferences finiteDifferences = new FiniteDifferences(MASS, SPIN);
     private final AutomaticDifferentiation automaticDifferentiation = new AutomaticDifferentiation(MASS, SPIN);
@@ -78,6 +84,30 @@ public class ChristoffelBenchmark {
         inputs.advance();
         generatedFull.evaluate(inputs.point(), full);
         return full;
+    }
+
+    /** Generated, layout non-zero, sine and cosine computed together. */
+    @Benchmark
+    public double[] sharedNonZero(KerrInputs inputs) {
+        inputs.advance();
+        sharedNonZero.evaluate(inputs.point(), nonZero);
+        return nonZero;
+    }
+
+    /** Generated, layout full, sine and cosine computed together. */
+    @Benchmark
+    public double[] sharedFull(KerrInputs inputs) {
+        inputs.advance();
+        sharedFull.evaluate(inputs.point(), full);
+        return full;
+    }
+
+    /** The expression graph as it was built. */
+    @Benchmark
+    public double[] graphAlone(KerrInputs inputs) {
+        inputs.advance();
+        graphAlone.evaluate(inputs.point(), nonZero);
+        return nonZero;
     }
 
     /** Closed forms with {@code Math.pow} and trigonometry in place. */

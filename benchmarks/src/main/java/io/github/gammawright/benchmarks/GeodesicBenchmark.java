@@ -28,6 +28,8 @@ import org.openjdk.jmh.annotations.Warmup;
 public class GeodesicBenchmark {
 
     private final DenseContraction contraction = new DenseContraction(MASS, SPIN);
+    private final ExpertAcceleration expertAcceleration = new ExpertAcceleration(MASS, SPIN);
+    private final ExpertFlow expertFlow = new ExpertFlow(MASS, SPIN);
     private final KerrGeodesicAcceleration acceleration = new KerrGeodesicAcceleration(MASS, SPIN);
     private final KerrHamiltonianFlow flow = new KerrHamiltonianFlow(MASS, SPIN);
     private final GeodesicEquation geodesicEquation =
@@ -45,6 +47,22 @@ public class GeodesicBenchmark {
         inputs.advance();
         contraction.evaluate(inputs.point(), inputs.vector(), result);
         return result;
+    }
+
+    /** The acceleration by an expert's hand. */
+    @Benchmark
+    public double[] expertAcceleration(KerrInputs inputs) {
+        inputs.advance();
+        expertAcceleration.evaluate(inputs.point(), inputs.vector(), result);
+        return result;
+    }
+
+    /** Hamilton's equations by an expert's hand. */
+    @Benchmark
+    public double[] expertFlow(KerrInputs inputs) {
+        inputs.advance();
+        expertFlow.evaluate(inputs.point(), inputs.vector(), derivatives);
+        return derivatives;
     }
 
     /** The generated kernel for the acceleration. */

@@ -188,7 +188,7 @@ final class Generators {
                 case COORDINATE -> 0;
                 case PARAMETER -> 1;
                 case CALLER_FUNCTION -> 2;
-                case VELOCITY -> 3;
+                case VELOCITY, COORDINATE_VELOCITY -> 3;
                 case MOMENTUM -> 4;
                 case VECTOR -> 5;
                 case SEPARATION -> 6;

@@ -2,6 +2,8 @@ package io.github.gammawright.emission;
 
 import io.github.gammawright.definition.ExpressionPrinter;
 import io.github.gammawright.definition.MetricDefinition;
+import io.github.gammawright.geometry.Layout;
+import io.github.gammawright.geometry.Shape;
 import io.github.gammawright.graph.Instruction;
 import java.util.List;
 
@@ -32,7 +34,8 @@ final class ClassJavadoc {
         String quantities = String.join(
                 ", ",
                 context.model().results().stream()
-                        .map(result -> words(result) + " " + result.quantity().formula())
+                        .map(result -> words(result) + " "
+                                + result.quantity().formula(context.model().layout()))
                         .toList());
         String title = definition.title().isBlank() ? "" : ": " + definition.title();
         text.append(JavadocText.wrap(
@@ -98,7 +101,7 @@ final class ClassJavadoc {
         for (int r = 0; r < context.model().results().size(); r++) {
             KernelModel.Result result = context.model().results().get(r);
             paragraph("Result " + code(context.names().results().get(r)) + ": "
-                    + code(result.quantity().formula()) + ", " + context.length(r)
+                    + code(result.quantity().formula(context.model().layout())) + ", " + context.length(r)
                     + (context.length(r) == 1 ? " entry" : " entries") + layout(result));
         }
         paragraph("Sign conventions of Misner, Thorne &amp; Wheeler (1973); indices follow the order of the"
@@ -109,6 +112,12 @@ final class ClassJavadoc {
         boolean symmetric = result.shape().symmetricPair();
         if (result.shape().rank() == 0) {
             return ".";
+        }
+        if (result.shape().symmetry() == Shape.Symmetry.CURVATURE
+                && context.model().layout() == Layout.PACKED) {
+            return ", of the pairs A = k(k&#8722;1)/2 + l with k &gt; l and B of i &gt; j alike one entry at A(A+1)/2 + B"
+                    + " for A &#8805; B; the static index and sign methods tell where each component is and with which"
+                    + " sign.";
         }
         return switch (context.model().layout()) {
             case FULL -> ", row-major over all indices in the order of the formula.";

@@ -2,6 +2,7 @@ package io.github.gammawright.emission;
 
 import com.palantir.javapoet.MethodSpec;
 import com.palantir.javapoet.TypeSpec;
+import io.github.gammawright.geometry.Quantity;
 import io.github.gammawright.graph.Instruction;
 import io.github.gammawright.graph.StraightLineProgram;
 import io.github.gammawright.graph.Symbol;
@@ -123,8 +124,12 @@ record EmissionContext(
         for (KernelModel.Result result : model.results()) {
             for (int slot = 0; slot < result.slots().size(); slot++) {
                 StringBuilder name = new StringBuilder(result.quantity().variableName());
+                // the flow by time has no entries for the time, though its positions count from 0
+                int first = result.quantity() == Quantity.HAMILTONIAN_FLOW_BY_TIME
+                        ? 1
+                        : result.shape().first();
                 for (int index : result.components().get(slot)) {
-                    int coordinate = index + result.shape().first();
+                    int coordinate = index + first;
                     name.append('_').append(coordinate < coordinates.size() ? coordinates.get(coordinate) : coordinate);
                 }
                 names.putIfAbsent(result.slots().get(slot), name.toString());

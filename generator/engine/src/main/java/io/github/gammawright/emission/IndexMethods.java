@@ -15,6 +15,8 @@ final class IndexMethods {
 
     private static final List<String> INDICES = List.of("l", "k", "i", "j");
 
+    private static final List<String> CURVATURE_INDICES = List.of("k", "l", "i", "j");
+
     private static final int LARGEST_SWITCH = 128;
 
     private final EmissionContext context;
@@ -62,13 +64,46 @@ final class IndexMethods {
                         "$L",
                         MethodJavadoc.index(
                                 result, context.isSingle(), context.model().layout() == Layout.NON_ZERO));
-        List<String> indices = names(shape.rank());
+        boolean packed = context.model().layout() != Layout.FULL;
+        boolean curvature = shape.symmetry() == Shape.Symmetry.CURVATURE;
+        List<String> indices = curvature ? CURVATURE_INDICES : names(shape.rank());
         indices.forEach(index -> method.addParameter(int.class, index));
-        method.addCode(position(shape, indices, context.model().layout() != Layout.FULL));
+        method.addCode(packed && curvature ? pairPosition(shape.extents().get(0)) : position(shape, indices, packed));
         if (isLookedUp()) {
             lookUp(result, method);
         }
         context.type().addMethod(method.build());
+        if (packed && curvature) {
+            sign(result, name);
+        }
+    }
+
+    /** The sign with which the stored component enters that of the given indices. */
+    private void sign(KernelModel.Result result, String index) {
+        String name = context.isSingle() ? "sign" : result.quantity().variableName() + "Sign";
+        MethodSpec.Builder method = MethodSpec.methodBuilder(name)
+                .addModifiers(Modifier.PUBLIC, Modifier.STATIC)
+                .returns(int.class)
+                .addJavadoc("$L", MethodJavadoc.sign(result, context.isSingle()));
+        CURVATURE_INDICES.forEach(i -> method.addParameter(int.class, i));
+        method.addStatement("return $L(k, l, i, j) < 0 ? 0 : (k > l) == (i > j) ? 1 : -1", index);
+        context.type().addMethod(method.build());
+    }
+
+    /** Pairs A = k(k−1)/2 + l of k &gt; l and B alike, at A(A+1)/2 + B for A ≥ B. */
+    private CodeBlock pairPosition(int n) {
+        CodeBlock.Builder code = CodeBlock.builder();
+        for (String index : CURVATURE_INDICES) {
+            code.addStatement("$T.checkIndex($L, $L)", Objects.class, index, n);
+        }
+        code.beginControlFlow("if (k == l || i == j)").addStatement("return -1").endControlFlow();
+        String math = context.functions().math();
+        code.addStatement("int first = $1L.max(k, l) * ($1L.max(k, l) - 1) / 2 + $1L.min(k, l)", math);
+        code.addStatement("int second = $1L.max(i, j) * ($1L.max(i, j) - 1) / 2 + $1L.min(i, j)", math);
+        code.addStatement("int row = $L.max(first, second)", math);
+        code.addStatement("int column = $L.min(first, second)", math);
+        code.addStatement("$L row * (row + 1) / 2 + column", isLookedUp() ? "int position =" : "return");
+        return code.build();
     }
 
     private boolean isLookedUp() {

@@ -39,7 +39,7 @@ record KernelInput(Symbol.Kind kind, String name, List<String> coordinates) {
         inputs.add(new KernelInput(Symbol.Kind.COORDINATE, "point", definition.coordinates()));
         for (KernelModel.Result result : model.results()) {
             for (String further : result.quantity().furtherInputs()) {
-                KernelInput input = further(further, result, definition);
+                KernelInput input = further(further, definition);
                 if (!inputs.contains(input)) {
                     inputs.add(input);
                 }
@@ -48,10 +48,15 @@ record KernelInput(Symbol.Kind kind, String name, List<String> coordinates) {
         return List.copyOf(inputs);
     }
 
-    private static KernelInput further(String name, KernelModel.Result result, MetricDefinition definition) {
-        Symbol.Kind kind = Symbol.Kind.valueOf(name.toUpperCase(Locale.ROOT));
+    /** What the entries of a further input are, by its name. */
+    static Symbol.Kind kind(String name) {
+        return Symbol.Kind.valueOf(name.replaceAll("(?=[A-Z])", "_").toUpperCase(Locale.ROOT));
+    }
+
+    private static KernelInput further(String name, MetricDefinition definition) {
+        Symbol.Kind kind = kind(name);
         // a velocity by coordinate time has no entry for the time, which is 1
-        boolean byTime = kind == Symbol.Kind.VELOCITY && result.shape().first() == 1;
+        boolean byTime = kind == Symbol.Kind.COORDINATE_VELOCITY;
         List<String> coordinates = definition.coordinates();
         return new KernelInput(kind, name, byTime ? coordinates.subList(1, coordinates.size()) : coordinates);
     }

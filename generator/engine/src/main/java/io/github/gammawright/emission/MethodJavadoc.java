@@ -80,6 +80,13 @@ final class MethodJavadoc {
                 + "@throws IllegalArgumentException if the array has a wrong length\n";
     }
 
+    static String sign(KernelModel.Result result, boolean single) {
+        String name = single ? "the result" : "{@code " + result.quantity().variableName() + "}";
+        return "How a component with all indices below comes from the entry of " + name
+                + " that index points to.\n\n@return 1 or -1, which the entry is to be multiplied with, or 0 for a"
+                + " component that is zero\n@throws IndexOutOfBoundsException if there is no such component\n";
+    }
+
     static String index(KernelModel.Result result, boolean single, boolean mayBeZero) {
         String name = single ? "the result" : "{@code " + result.quantity().variableName() + "}";
         StringBuilder text = new StringBuilder("Where a component is in " + name + ".");
@@ -116,7 +123,11 @@ final class MethodJavadoc {
     }
 
     private static String entries(EmissionContext context, int result) {
-        String formula = context.model().results().get(result).quantity().formula();
+        String formula = context.model()
+                .results()
+                .get(result)
+                .quantity()
+                .formula(context.model().layout());
         return JavadocText.escape(formula) + ", {@code " + context.lengthConstant(result) + "} entries";
     }
 

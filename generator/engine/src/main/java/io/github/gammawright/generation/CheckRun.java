@@ -4,9 +4,6 @@ import io.github.gammawright.definition.MetricDefinition;
 import io.github.gammawright.verification.CheckSettings;
 import io.github.gammawright.verification.KernelCheck;
 import io.github.gammawright.verification.KernelReport;
-import io.github.gammawright.verification.KernelUnderTest;
-import io.github.gammawright.verification.KernelUnderTest.RequestedFunction;
-import java.util.List;
 
 /** Makes kernels of one definition and compares each with the reference; nothing is written. Not thread-safe. */
 public final class CheckRun {
@@ -26,14 +23,6 @@ public final class CheckRun {
      * @throws io.github.gammawright.diagnostic.DefinitionException for mistakes of the definition that show only now
      */
     public KernelReport check(KernelSpecification kernel) {
-        GeneratedClass made = new KernelGenerator().generate(definition, kernel);
-        return check.check(new KernelUnderTest(
-                kernel.qualifiedName(), made.source(), kernel.quantities(), kernel.layout(), requested(made)));
-    }
-
-    private static List<RequestedFunction> requested(GeneratedClass made) {
-        return made.functions().stream()
-                .map(function -> new RequestedFunction(function.name(), function.method(), function.orders()))
-                .toList();
+        return check.check(new KernelGenerator().generate(definition, kernel).underTest());
     }
 }

@@ -30,9 +30,25 @@ final class ComponentLabels {
             case CHRISTOFFEL_TRACE -> gamma() + "^m" + group("_", "m", names.get(tuple[0]));
             case CONTRACTED_CHRISTOFFEL ->
                 "g" + group("^", "i", "j") + " " + gamma() + upper(tuple[0]) + group("_", "i", "j");
+            case CHRISTOFFEL_DERIVATIVE ->
+                partial(tuple[0]) + " " + gamma() + upper(tuple[1]) + lower(tuple[2], tuple[3]);
             case GEODESIC_ACCELERATION -> rate("u" + upper(tuple[0]));
+            case GEODESIC_ACCELERATION_BY_TIME -> rateByTime("v" + upper(tuple[0] + 1));
             case HAMILTONIAN_FLOW ->
                 tuple[0] < names.size() ? rate(names.get(tuple[0])) : rate("p" + lower(tuple[0] - names.size()));
+            case HAMILTONIAN_FLOW_BY_TIME ->
+                tuple[0] < names.size() - 1
+                        ? rateByTime(names.get(tuple[0] + 1))
+                        : rateByTime("p" + lower(tuple[0] - names.size() + 2));
+            case PARALLEL_TRANSPORT -> rate("v" + upper(tuple[0]));
+            case GEODESIC_DEVIATION ->
+                latex ? "\\frac{D^2 \\xi" + upper(tuple[0]) + "}{d\\lambda^2}" : "D²ξ" + upper(tuple[0]) + "/dλ²";
+            case RIEMANN -> "R" + lower(tuple);
+            case WEYL -> "C" + lower(tuple);
+            case RICCI -> "R" + lower(tuple);
+            case RICCI_SCALAR -> "R";
+            case EINSTEIN -> "G" + lower(tuple);
+            case KRETSCHMANN -> latex ? "R_{klij} R^{klij}" : "R_klij R^klij";
             case ORTHONORMAL_FRAME -> "e" + legs(tuple[0]) + upper(tuple[1]);
             case ROTATION_COEFFICIENTS -> smallGamma() + legs(tuple);
             case STRESS_SOURCE ->
@@ -86,6 +102,11 @@ final class ComponentLabels {
 
     private String rate(String of) {
         return latex ? "\\frac{d " + of + "}{d\\lambda}" : "d " + of + "/dλ";
+    }
+
+    private String rateByTime(String of) {
+        String time = names.get(0);
+        return latex ? "\\frac{d " + of + "}{d " + time + "}" : "d " + of + "/d" + time;
     }
 
     private String upper(int... indices) {

@@ -68,7 +68,7 @@ final class FormulaOrder {
                 case PARAMETER -> 1;
                 case COORDINATE -> 2;
                 case CALLER_FUNCTION -> 3;
-                case VELOCITY, MOMENTUM -> 10;
+                case VELOCITY, COORDINATE_VELOCITY, MOMENTUM -> 10;
                 case VECTOR, SEPARATION -> 11;
             };
         }

@@ -5,6 +5,7 @@ import io.github.gammawright.algebra.NormalForms;
 import io.github.gammawright.definition.MetricDefinition;
 import io.github.gammawright.geometry.DomainSigns;
 import io.github.gammawright.geometry.Geometry;
+import io.github.gammawright.geometry.Layout;
 import io.github.gammawright.geometry.MetricGraph;
 import io.github.gammawright.geometry.MetricGraphBuilder;
 import io.github.gammawright.geometry.Quantity;
@@ -42,15 +43,17 @@ public final class FormulaView {
         MetricGraph metric = MetricGraphBuilder.build(definition);
         Route route = Route.candidates(metric, List.of(quantity)).get(0);
         Geometry geometry = new Geometry(metric, route, Applicability.framePlan(definition, List.of(quantity)));
-        List<Node> components = geometry.components(quantity);
+        List<Node> entries = geometry.entries(quantity, Layout.PACKED);
         NormalForms forms = new NormalForms(metric.graph(), FormStyle.READABLE);
         ExpressionGraph graph = forms.target();
         ComponentLabels labels = new ComponentLabels(definition.coordinates(), quantity, form);
         Shape shape = quantity.shape(definition.dimension());
         Map<Node, Node> known = new HashMap<>();
         Map<String, Node> values = new LinkedHashMap<>();
-        for (int[] tuple : shape.independentTuples()) {
-            Node component = components.get(shape.fullIndex(tuple));
+        List<int[]> tuples = shape.independentTuples();
+        for (int entry = 0; entry < tuples.size(); entry++) {
+            int[] tuple = tuples.get(entry);
+            Node component = entries.get(entry);
             if (!component.isZero()) {
                 Node readable = quantity == Quantity.VOLUME_ELEMENT
                         ? VolumeElement.of(graph, readable(forms, geometry.determinant()), new DomainSigns(definition))
@@ -72,8 +75,11 @@ public final class FormulaView {
         return forms.factored(value).orElseGet(() -> forms.copied(value));
     }
 
-    /** Of a symmetric pair the earlier coordinate comes first, as one writes it. */
+    /** Of a symmetric pair the earlier coordinate comes first, as one writes it; so it does in both antisymmetric ones. */
     private static int[] asWritten(Shape shape, int... tuple) {
+        if (shape.symmetry() == Shape.Symmetry.CURVATURE) {
+            return new int[] {tuple[1], tuple[0], tuple[3], tuple[2]};
+        }
         int[] written = tuple.clone();
         if (shape.symmetricPair()) {
             int last = written.length - 1;

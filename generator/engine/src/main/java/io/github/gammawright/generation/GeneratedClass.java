@@ -1,6 +1,7 @@
 package io.github.gammawright.generation;
 
 import io.github.gammawright.emission.EmittedFunction;
+import io.github.gammawright.verification.KernelUnderTest;
 import java.util.List;
 
 /**
@@ -16,6 +17,19 @@ public record GeneratedClass(
 
     public GeneratedClass {
         functions = List.copyOf(functions);
+    }
+
+    /** The class as a check takes it. */
+    public KernelUnderTest underTest() {
+        return new KernelUnderTest(
+                specification.qualifiedName(),
+                source,
+                specification.quantities(),
+                specification.layout(),
+                functions.stream()
+                        .map(function -> new KernelUnderTest.RequestedFunction(
+                                function.name(), function.method(), function.orders()))
+                        .toList());
     }
 
     /** The path of the source file below a source root, with {@code /} between its parts. */

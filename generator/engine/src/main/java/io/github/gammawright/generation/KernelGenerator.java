@@ -35,8 +35,7 @@ public final class KernelGenerator {
         Optional<FramePlan> framePlan = Applicability.framePlan(definition, specification.quantities());
         List<Candidate> candidates = new ArrayList<>();
         for (Route route : Route.candidates(MetricGraphBuilder.build(definition), specification.quantities())) {
-            candidates.addAll(
-                    Candidate.of(definition, specification.quantities(), route, framePlan, candidates.isEmpty()));
+            candidates.addAll(Candidate.of(definition, specification, route, framePlan, candidates.isEmpty()));
         }
         Optimiser optimiser = new Optimiser(
                 DomainPoints.guard(definition, GUARD_POINTS),

@@ -20,7 +20,8 @@ final class KernelModels {
     /**
      * The model of a class.
      *
-     * @param zero for each quantity which components vanish, row-major; the program's outputs are these, in this order
+     * @param zero for each quantity which entries of its layout vanish; the program's outputs are these entries, in this
+     *     order
      */
     static KernelModel of(
             MetricDefinition definition,
@@ -56,14 +57,14 @@ final class KernelModels {
             int offset) {
         List<Integer> slots = new ArrayList<>();
         List<List<Integer>> tuples = new ArrayList<>();
-        for (int[] tuple : layout == Layout.FULL ? shape.tuples() : shape.independentTuples()) {
-            int component = shape.fullIndex(tuple);
-            boolean vanishes = zero.get(component);
+        List<int[]> stored = shape.tuples(layout);
+        for (int entry = 0; entry < stored.size(); entry++) {
+            boolean vanishes = zero.get(entry);
             if (vanishes && layout == Layout.NON_ZERO) {
                 continue;
             }
-            slots.add(vanishes ? -1 : program.outputs().get(offset + component));
-            tuples.add(java.util.Arrays.stream(tuple).boxed().toList());
+            slots.add(vanishes ? -1 : program.outputs().get(offset + entry));
+            tuples.add(java.util.Arrays.stream(stored.get(entry)).boxed().toList());
         }
         return new KernelModel.Result(quantity, shape, slots, tuples);
     }

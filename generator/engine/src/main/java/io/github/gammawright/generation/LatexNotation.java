@@ -31,7 +31,7 @@ final class LatexNotation implements Notation {
             case CALLER_FUNCTION -> callerFunction(symbol, name);
             case VELOCITY -> new Piece("u^{" + name + "}", Strength.POWER);
             case MOMENTUM -> Piece.atom("p_{" + name + "}");
-            case VECTOR -> new Piece("v^{" + name + "}", Strength.POWER);
+            case VECTOR, COORDINATE_VELOCITY -> new Piece("v^{" + name + "}", Strength.POWER);
             case SEPARATION -> new Piece("\\xi^{" + name + "}", Strength.POWER);
         };
     }

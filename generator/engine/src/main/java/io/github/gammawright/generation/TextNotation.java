@@ -28,7 +28,7 @@ final class TextNotation implements Notation {
             case CALLER_FUNCTION -> callerFunction(symbol);
             case VELOCITY -> Piece.atom("u_" + symbol.name());
             case MOMENTUM -> Piece.atom("p_" + symbol.name());
-            case VECTOR -> Piece.atom("v_" + symbol.name());
+            case VECTOR, COORDINATE_VELOCITY -> Piece.atom("v_" + symbol.name());
             case SEPARATION -> Piece.atom("xi_" + symbol.name());
         };
     }

@@ -9,6 +9,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.Function;
 import org.hipparchus.fraction.BigFraction;
 
 /**
@@ -30,6 +31,7 @@ public final class Geometry {
     private Node[][][] christoffel;
     private Slicing slicing;
     private Frame frame;
+    private Curvature curvature;
 
     /** The geometry of a metric, along a route. */
     public Geometry(MetricGraph metric, Route route) {
@@ -60,6 +62,19 @@ public final class Geometry {
             case CONTRACTED_CHRISTOFFEL -> components.addAll(contracted());
             case GEODESIC_ACCELERATION -> components.addAll(geodesicAcceleration());
             case HAMILTONIAN_FLOW -> components.addAll(hamiltonianFlow());
+            case CHRISTOFFEL_DERIVATIVE -> components.addAll(new ChristoffelDerivative(this).components());
+            case GEODESIC_ACCELERATION_BY_TIME ->
+                components.addAll(new FlowsByTime(this).acceleration(geodesicAcceleration()));
+            case HAMILTONIAN_FLOW_BY_TIME ->
+                components.addAll(new FlowsByTime(this).hamiltonianFlow(hamiltonianFlow()));
+            case PARALLEL_TRANSPORT -> components.addAll(new ParallelTransport(this).rates());
+            case GEODESIC_DEVIATION -> components.addAll(new GeodesicDeviation(this).acceleration());
+            case RIEMANN -> components.addAll(curvature().mixed(curvature().riemann()));
+            case WEYL -> components.addAll(curvature().mixed(curvature().weyl()));
+            case RICCI -> addMatrix(curvature().ricci(), components);
+            case RICCI_SCALAR -> components.add(curvature().scalar());
+            case EINSTEIN -> addMatrix(curvature().einstein(), components);
+            case KRETSCHMANN -> components.add(curvature().kretschmann());
             case ORTHONORMAL_FRAME -> addMatrix(frame().vectors(), components);
             case ROTATION_COEFFICIENTS -> components.addAll(RotationCoefficients.of(metric, frame()));
             case STRESS_SOURCE -> components.addAll(stressSource());
@@ -76,6 +91,101 @@ public final class Geometry {
                     MEAN_CURVATURE -> components.addAll(slicing().components(quantity));
         }
         return components;
+    }
+
+    /** The components of a quantity that a layout stores, those that vanish included, in its order. */
+    public List<Node> entries(Quantity quantity, Layout layout) {
+        if (layout != Layout.FULL && quantity.isCurvatureTensor()) {
+            return PairMatrix.packed(
+                    quantity == Quantity.RIEMANN
+                            ? curvature().riemann()
+                            : curvature().weyl());
+        }
+        List<Node> all = components(quantity);
+        Shape shape = quantity.shape(n);
+        return shape.tuples(layout).stream()
+                .map(tuple -> all.get(shape.fullIndex(tuple)))
+                .toList();
+    }
+
+    MetricGraph metric() {
+        return metric;
+    }
+
+    Route route() {
+        return route;
+    }
+
+    Differentiation differentiation() {
+        return differentiation;
+    }
+
+    /** A part of the geometry that others are made of. */
+    public enum Part {
+        /** Γ^k_ij. */
+        CONNECTION,
+        /** R_klij. */
+        CURVATURE
+    }
+
+    /**
+     * The same geometry with the inverse metric and another part given in other forms, on another graph.
+     *
+     * @param other the metric there
+     * @param form the other form of a value; empty if there is none
+     */
+    public Optional<Geometry> withForms(Part part, MetricGraph other, Function<Node, Optional<Node>> form) {
+        Forms forms = new Forms(other.graph(), form);
+        Geometry changed = new Geometry(other, route);
+        changed.inverse =
+                new ComponentInverse(other.graph(), forms.matrix(inverse().components()), forms.of(determinant()));
+        if (part == Part.CURVATURE) {
+            changed.curvature = new Curvature(changed, curvature().riemann().with(other.graph(), forms::of));
+        } else {
+            changed.christoffel = new Node[n][][];
+            for (int k = 0; k < n; k++) {
+                changed.christoffel[k] = forms.matrix(christoffel()[k]);
+            }
+        }
+        return forms.complete ? Optional.of(changed) : Optional.empty();
+    }
+
+    /** Takes values to other forms and notes whether all have one. */
+    private static final class Forms {
+        private final ExpressionGraph target;
+        private final Function<Node, Optional<Node>> form;
+        private boolean complete = true;
+
+        Forms(ExpressionGraph target, Function<Node, Optional<Node>> form) {
+            this.target = target;
+            this.form = form;
+        }
+
+        Node of(Node node) {
+            Optional<Node> found = complete ? form.apply(node) : Optional.empty();
+            complete &= found.isPresent();
+            Node result = found.orElse(target.zero());
+            target.keep(result);
+            return result;
+        }
+
+        Node[][] matrix(Node[][] symmetric) {
+            Node[][] changed = new Node[symmetric.length][symmetric.length];
+            for (int i = 0; i < symmetric.length; i++) {
+                for (int j = 0; j <= i; j++) {
+                    changed[i][j] = of(symmetric[i][j]);
+                    changed[j][i] = changed[i][j];
+                }
+            }
+            return changed;
+        }
+    }
+
+    Curvature curvature() {
+        if (curvature == null) {
+            curvature = new Curvature(this);
+        }
+        return curvature;
     }
 
     private static void addMatrix(Node[][] matrix, List<Node> components) {
@@ -151,7 +261,7 @@ public final class Geometry {
     }
 
     /** Γ^k_ij = g^kl Γ_lij; k, i, j. */
-    private Node[][][] christoffel() {
+    Node[][][] christoffel() {
         if (christoffel == null) {
             Node[][][] lower = firstKind();
             christoffel = new Node[n][n][n];
@@ -192,7 +302,7 @@ public final class Geometry {
     }
 
     /** Γ^m_mk = ½ g^ij ∂_k g_ij. */
-    private List<Node> trace() {
+    List<Node> trace() {
         Node[][] g = inverse().components();
         List<Node> trace = new ArrayList<>();
         for (int k = 0; k < n; k++) {

@@ -6,6 +6,7 @@ import io.github.gammawright.graph.Symbol;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.UnaryOperator;
 
 /**
  * A metric as nodes of a graph.
@@ -30,6 +31,30 @@ public record MetricGraph(
         Optional<List<WeightedSquare>> squares,
         Optional<Split> split,
         Optional<Coframe> coframe) {
+
+    /**
+     * The same metric on another graph, without what its author wrote but for the quadratic form.
+     *
+     * @param copy takes values there
+     */
+    public MetricGraph on(ExpressionGraph target, UnaryOperator<Node> copy) {
+        int n = dimension();
+        Node[][] copied = new Node[n][n];
+        for (int i = 0; i < n; i++) {
+            for (int j = 0; j < n; j++) {
+                copied[i][j] = copy.apply(components[i][j]);
+            }
+        }
+        return new MetricGraph(
+                target,
+                coordinates,
+                copied,
+                quadraticForm.map(copy),
+                velocities,
+                Optional.empty(),
+                Optional.empty(),
+                Optional.empty());
+    }
 
     /** The number of coordinates. */
     public int dimension() {

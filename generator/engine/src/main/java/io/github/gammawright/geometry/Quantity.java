@@ -25,10 +25,32 @@ public enum Quantity {
     CHRISTOFFEL_TRACE("Γ^m_mk", List.of()),
     /** g^ij Γ^k_ij. */
     CONTRACTED_CHRISTOFFEL("g^ij Γ^k_ij", List.of()),
+    /** ∂_l Γ^k_ij; l, k, i, j. */
+    CHRISTOFFEL_DERIVATIVE("∂_l Γ^k_ij", List.of()),
     /** −Γ^k_ij u^i u^j. */
     GEODESIC_ACCELERATION("−Γ^k_ij u^i u^j", List.of("velocity")),
+    /** −Γ^k_ij v^i v^j + v^k Γ^0_ij v^i v^j, k ≥ 1, with v^k = dx^k/dt and v^0 = 1. */
+    GEODESIC_ACCELERATION_BY_TIME("−Γ^k_ij v^i v^j + v^k Γ^0_ij v^i v^j", List.of("coordinateVelocity")),
     /** dx^i/dλ, then dp_i/dλ, of H = ½ g^ij p_i p_j. */
     HAMILTONIAN_FLOW("dx^i/dλ, dp_i/dλ", List.of("momentum")),
+    /** The Hamiltonian flow divided by dx^0/dλ: dx^k/dt, then dp_k/dt, k ≥ 1. */
+    HAMILTONIAN_FLOW_BY_TIME("dx^k/dt, dp_k/dt", List.of("momentum")),
+    /** −Γ^k_ij u^i v^j. */
+    PARALLEL_TRANSPORT("−Γ^k_ij u^i v^j", List.of("velocity", "vector")),
+    /** D²ξ^k/dλ² = −R^k_ijl u^i ξ^j u^l. */
+    GEODESIC_DEVIATION("−R^k_ijl u^i ξ^j u^l", List.of("velocity", "separation")),
+    /** R^k_lij; k, l, i, j; where symmetric components are stored once, R_klij. */
+    RIEMANN("R^k_lij", List.of()),
+    /** C^k_lij; k, l, i, j; where symmetric components are stored once, C_klij. */
+    WEYL("C^k_lij", List.of()),
+    /** R_ij = R^k_ikj. */
+    RICCI("R_ij", List.of()),
+    /** R = g^ij R_ij. */
+    RICCI_SCALAR("R", List.of()),
+    /** R_ij − ½ g_ij R. */
+    EINSTEIN("R_ij − ½ g_ij R", List.of()),
+    /** R_klij R^klij. */
+    KRETSCHMANN("R_klij R^klij", List.of()),
     /** e_a^i with g(e_a, e_b) = ±δ_ab; a, i. The coframe's frame, or else the one of {@link FramePlan}. */
     ORTHONORMAL_FRAME("e_a^i", List.of()),
     /** γ_abc = g(e_a, ∇_c e_b), Ricci's rotation coefficients, −γ_bac; a, b, c: c is the direction of the derivative. */
@@ -66,6 +88,17 @@ public enum Quantity {
         this.furtherInputs = furtherInputs;
     }
 
+    /** The part of the geometry from which the components can be made that takes the most work to compute itself. */
+    public Optional<Geometry.Part> madeOf() {
+        return switch (this) {
+            case RIEMANN, WEYL, RICCI, RICCI_SCALAR, EINSTEIN, KRETSCHMANN, GEODESIC_DEVIATION ->
+                Optional.of(Geometry.Part.CURVATURE);
+            case CHRISTOFFEL_DERIVATIVE, PARALLEL_TRANSPORT, GEODESIC_ACCELERATION_BY_TIME ->
+                Optional.of(Geometry.Part.CONNECTION);
+            default -> Optional.empty();
+        };
+    }
+
     /** The name on the command line and in definitions, such as {@code geodesic-acceleration}. */
     public String symbol() {
         return name().toLowerCase(Locale.ROOT).replace('_', '-');
@@ -89,6 +122,19 @@ public enum Quantity {
     /** The component in the notation of the trade. */
     public String formula() {
         return formula;
+    }
+
+    /** The component that a layout stores, in the notation of the trade. */
+    public String formula(Layout layout) {
+        return layout != Layout.FULL && isCurvatureTensor() ? formula.replace("^k_lij", "_klij") : formula;
+    }
+
+    /**
+     * Whether the components are those of a curvature tensor: R^k_lij in the full layout, and in the others the
+     * independent ones of R_klij.
+     */
+    public boolean isCurvatureTensor() {
+        return this == RIEMANN || this == WEYL;
     }
 
     /** The arrays that {@code evaluate} takes between the point and the result, by their names. */
@@ -122,14 +168,22 @@ public enum Quantity {
     /** The index structure in n dimensions. */
     public Shape shape(int n) {
         return switch (this) {
-            case METRIC, INVERSE_METRIC -> new Shape(List.of(n, n), 0, true);
-            case VOLUME_ELEMENT -> new Shape(List.of(), 0, false);
-            case ORTHONORMAL_FRAME -> new Shape(List.of(n, n), 0, false);
-            case ROTATION_COEFFICIENTS -> new Shape(List.of(n, n, n), 0, false);
+            case METRIC, INVERSE_METRIC, RICCI, EINSTEIN -> new Shape(List.of(n, n), 0, true);
+            case VOLUME_ELEMENT, RICCI_SCALAR, KRETSCHMANN -> new Shape(List.of(), 0, false);
             case METRIC_DERIVATIVE, CHRISTOFFEL, CHRISTOFFEL_FIRST_KIND, STRESS_SOURCE ->
                 new Shape(List.of(n, n, n), 0, true);
-            case CHRISTOFFEL_TRACE, CONTRACTED_CHRISTOFFEL, GEODESIC_ACCELERATION -> new Shape(List.of(n), 0, false);
+            case CHRISTOFFEL_DERIVATIVE -> new Shape(List.of(n, n, n, n), 0, true);
+            case CHRISTOFFEL_TRACE,
+                    CONTRACTED_CHRISTOFFEL,
+                    GEODESIC_ACCELERATION,
+                    PARALLEL_TRANSPORT,
+                    GEODESIC_DEVIATION -> new Shape(List.of(n), 0, false);
+            case GEODESIC_ACCELERATION_BY_TIME -> new Shape(List.of(n - 1), 1, false);
             case HAMILTONIAN_FLOW -> new Shape(List.of(2 * n), 0, false);
+            case HAMILTONIAN_FLOW_BY_TIME -> new Shape(List.of(2 * (n - 1)), 0, false);
+            case RIEMANN, WEYL -> new Shape(List.of(n, n, n, n), 0, Shape.Symmetry.CURVATURE);
+            case ORTHONORMAL_FRAME -> new Shape(List.of(n, n), 0, false);
+            case ROTATION_COEFFICIENTS -> new Shape(List.of(n, n, n), 0, false);
             case LAPSE, SPATIAL_VOLUME_ELEMENT, MEAN_CURVATURE -> new Shape(List.of(), 1, false);
             case SHIFT, LAPSE_DERIVATIVE -> new Shape(List.of(n - 1), 1, false);
             case SHIFT_DERIVATIVE -> new Shape(List.of(n - 1, n - 1), 1, false);

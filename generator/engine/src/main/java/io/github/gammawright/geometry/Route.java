@@ -1,18 +1,32 @@
 package io.github.gammawright.geometry;
 
 import java.util.ArrayList;
+import java.util.Collections;
+import java.util.EnumSet;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.Set;
 
 /**
  * One way of several to compute the quantities of a metric.
  *
  * @param inversion how the inverse metric is found
- * @param flow how the acceleration of geodesics is found
+ * @param flow how the acceleration of geodesics and other contractions with vectors are found
+ * @param second how second derivatives of the metric enter
  * @param bending how the extrinsic curvature is found
  */
-public record Route(Inversion inversion, Flow flow, Bending bending) {
+public record Route(Inversion inversion, Flow flow, Second second, Bending bending) {
+
+    /** A route for quantities that need no extrinsic curvature. */
+    public Route(Inversion inversion, Flow flow, Second second) {
+        this(inversion, flow, second, Bending.CONNECTION);
+    }
+
+    /** A route for quantities that need no second derivatives either. */
+    public Route(Inversion inversion, Flow flow) {
+        this(inversion, flow, Second.METRIC);
+    }
 
     /** How the inverse metric is found. */
     public enum Inversion {
@@ -22,9 +36,17 @@ public record Route(Inversion inversion, Flow flow, Bending bending) {
         RANK_ONE
     }
 
-    /** How the acceleration of geodesics is found. */
+    /** How second derivatives of the metric enter. */
+    public enum Second {
+        /** As such, with the components of the curvature tensor that have all indices below. */
+        METRIC,
+        /** As derivatives of the Christoffel symbols. */
+        CONNECTION
+    }
+
+    /** How the acceleration of geodesics and other contractions with vectors are found. */
     public enum Flow {
-        /** From the Christoffel symbols. */
+        /** From the Christoffel symbols, or the independent components of the curvature tensor. */
         CONTRACTION,
         /** By sweeps over g_ij u^i u^j, its components multiplied out. */
         COMPONENTS,
@@ -42,11 +64,26 @@ public record Route(Inversion inversion, Flow flow, Bending bending) {
         SQUARES
     }
 
+    private static final Set<Quantity> CONTRACTED = EnumSet.of(
+            Quantity.GEODESIC_ACCELERATION,
+            Quantity.GEODESIC_ACCELERATION_BY_TIME,
+            Quantity.PARALLEL_TRANSPORT,
+            Quantity.GEODESIC_DEVIATION);
+
+    private static final Set<Quantity> DIFFERENTIATED_TWICE = EnumSet.of(
+            Quantity.CHRISTOFFEL_DERIVATIVE,
+            Quantity.RIEMANN,
+            Quantity.WEYL,
+            Quantity.RICCI,
+            Quantity.RICCI_SCALAR,
+            Quantity.EINSTEIN);
+
     /** The route in words, for reports. */
     public String description() {
         return words(inversion).replace(' ', '-')
                 + " inverse, flow by "
                 + words(flow)
+                + (second == Second.CONNECTION ? ", second derivatives by the connection" : "")
                 + (bending == Bending.CONNECTION ? "" : ", extrinsic curvature by " + words(bending));
     }
 
@@ -63,17 +100,23 @@ public record Route(Inversion inversion, Flow flow, Bending bending) {
             inversions.add(Inversion.RANK_ONE);
         }
         List<Flow> flows = new ArrayList<>(List.of(Flow.COMPONENTS));
-        if (quantities.contains(Quantity.GEODESIC_ACCELERATION)) {
+        if (!Collections.disjoint(quantities, CONTRACTED)) {
             flows.add(Flow.CONTRACTION);
             if (metric.quadraticForm().isPresent()) {
                 flows.add(Flow.AUTHORS_FORM);
             }
         }
+        List<Second> seconds = new ArrayList<>(List.of(Second.METRIC));
+        if (!Collections.disjoint(quantities, DIFFERENTIATED_TWICE)) {
+            seconds.add(Second.CONNECTION);
+        }
         List<Route> routes = new ArrayList<>();
         for (Inversion inversion : inversions) {
             for (Flow flow : flows) {
-                for (Bending bending : bendings(metric, quantities)) {
-                    routes.add(new Route(inversion, flow, bending));
+                for (Second second : seconds) {
+                    for (Bending bending : bendings(metric, quantities)) {
+                        routes.add(new Route(inversion, flow, second, bending));
+                    }
                 }
             }
         }

@@ -34,6 +34,8 @@ public record Symbol(Kind kind, String name, int index, List<Integer> orders) {
         /** A function of coordinates that the caller supplies, or a partial derivative of it. */
         CALLER_FUNCTION,
         VELOCITY,
+        /** dx^k/dx^0, counted from 0 for the second coordinate. */
+        COORDINATE_VELOCITY,
         MOMENTUM,
         VECTOR,
         SEPARATION

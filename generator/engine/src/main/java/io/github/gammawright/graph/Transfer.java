@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.function.Predicate;
 
 /**
  * Copies values from one graph to another, with the names of those that the author named. A graph keeps one form for
@@ -14,11 +15,24 @@ public final class Transfer {
     private final ExpressionGraph source;
     private final ExpressionGraph target;
     private final Map<Node, Node> copies = new HashMap<>();
+    private Predicate<Node> fixed = node -> false;
 
     /** A way from the source to the target. */
     public Transfer(ExpressionGraph source, ExpressionGraph target) {
         this.source = source;
         this.target = target;
+    }
+
+    /**
+     * A way inside one graph on which values take the place of symbols. What does not depend on these stays as it is.
+     *
+     * @param values what takes the place of each symbol
+     */
+    public static Transfer substituting(ExpressionGraph graph, Map<Symbol, Node> values) {
+        Transfer transfer = new Transfer(graph, graph);
+        values.forEach((symbol, value) -> transfer.copies.put(graph.symbol(symbol), value));
+        transfer.fixed = node -> values.keySet().stream().noneMatch(symbol -> graph.dependsOn(node, symbol));
+        return transfer;
     }
 
     /** An empty graph over the same domain that has the named values of the source, and a way to it. */
@@ -45,6 +59,11 @@ public final class Transfer {
         List<Node> stack = new ArrayList<>(List.of(node));
         while (!stack.isEmpty()) {
             Node top = stack.get(stack.size() - 1);
+            if (fixed.test(top)) {
+                copies.put(top, top);
+                stack.remove(stack.size() - 1);
+                continue;
+            }
             boolean ready = true;
             for (Node operand : top.operands()) {
                 if (!copies.containsKey(operand)) {

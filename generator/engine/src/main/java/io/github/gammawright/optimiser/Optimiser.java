@@ -142,7 +142,7 @@ public final class Optimiser {
         int[] window = Windows.choose(network, random, MOST_MEMBERS);
         Resubstitution search = new Resubstitution(network, guard, random.nextLong(), window, MOST_MEMBERS);
         search.run(STEPS_A_ROUND);
-        spent += (long) STEPS_A_ROUND * window.length;
+        spent += (long) STEPS_A_ROUND * Math.max(1, window.length);
         return new State(NetworkWriter.write(network), network.totalCost(), guard.reached(), parent.start());
     }
 }

@@ -30,7 +30,8 @@ final class QuantityComparison {
 
     static QuantityComparison of(
             Quantity quantity, Layout layout, int n, KernelInstance instance, CheckSettings settings) throws Defect {
-        ReferenceQuantity reference = ReferenceQuantity.named(quantity.symbol()).orElseThrow();
+        ReferenceQuantity named = ReferenceQuantity.named(quantity.symbol()).orElseThrow();
+        ReferenceQuantity reference = layout == Layout.FULL ? named : named.packedForm();
         int first = quantity.shape(n).first();
         int length = instance.length(quantity);
         int rank = reference.extents(n).size();

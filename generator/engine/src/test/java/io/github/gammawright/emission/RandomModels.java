@@ -9,7 +9,6 @@ import io.github.gammawright.graph.RealFunction;
 import io.github.gammawright.graph.Symbol;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 import java.util.Random;
 
 /** Kernel models with random programs: any operation on any earlier values, results drawn from all of them. */
@@ -50,8 +49,9 @@ final class RandomModels {
         }
         for (Quantity quantity : quantities) {
             for (String input : quantity.furtherInputs()) {
-                Symbol.Kind kind = Symbol.Kind.valueOf(input.toUpperCase(Locale.ROOT));
-                for (int i = 0; i < dimension; i++) {
+                Symbol.Kind kind = KernelInput.kind(input);
+                int length = kind == Symbol.Kind.COORDINATE_VELOCITY ? dimension - 1 : dimension;
+                for (int i = 0; i < length; i++) {
                     values.add(model.program.load(kind, "x" + i, i));
                 }
             }

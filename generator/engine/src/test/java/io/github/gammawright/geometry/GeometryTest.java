@@ -100,8 +100,7 @@ class GeometryTest {
                 "flat-fold.metric.toml",
                 "name = \"flat-fold\"\ncoordinates = [\"x\", \"y\"]\nline-element = \"(dx + x*dy)^2\"\n"));
         MetricGraph metric = MetricGraphBuilder.build(degenerate);
-        Geometry geometry = new Geometry(
-                metric, new Route(Route.Inversion.BLOCKS, Route.Flow.COMPONENTS, Route.Bending.CONNECTION));
+        Geometry geometry = new Geometry(metric, new Route(Route.Inversion.BLOCKS, Route.Flow.COMPONENTS));
         assertThatThrownBy(() -> geometry.components(Quantity.CHRISTOFFEL))
                 .isInstanceOf(DegenerateMetricException.class);
     }

@@ -45,7 +45,7 @@ class FormulaViewTest {
                 .contains("Γ^t_tr = M*(r^2 + a^2)*(r^2 - a^2*cos(theta)^2)/(Sigma^2*Delta)");
         assertThat(show("kerr", Quantity.VOLUME_ELEMENT, FormulaPrinter.Form.TEXT))
                 .last()
-                .isEqualTo("√|g| = abs(Sigma)*abs(sin(theta))");
+                .isEqualTo("√|g| = Sigma*sin(theta)");
     }
 
     @Test

@@ -3,6 +3,8 @@ package io.github.gammawright.emission;
 import com.palantir.javapoet.CodeBlock;
 import com.palantir.javapoet.MethodSpec;
 import io.github.gammawright.emission.EmissionContext.InputUse;
+import io.github.gammawright.graph.Instruction;
+import io.github.gammawright.graph.StraightLineProgram;
 import java.util.BitSet;
 import java.util.List;
 import javax.lang.model.element.Modifier;
@@ -24,9 +26,20 @@ final class BodyMethods {
                 .flatMap(List::stream)
                 .filter(value -> value >= 0)
                 .toList();
-        this.inlining = new Inlining(context.program(), roots, context.values()::isGiven, new BitSet());
+        this.inlining = new Inlining(context.program(), roots, context.values()::isGiven, calls(context.program()));
         this.called = functions.used(i -> inlining.uses(i) > 0);
         this.uses = context.inputUses(i -> inlining.uses(i) > 0, functions.coordinates(called));
+    }
+
+    /** Sine and cosine stand where the program has them, and not where they are used: a call moves all else to memory. */
+    private static BitSet calls(StraightLineProgram program) {
+        BitSet calls = new BitSet();
+        for (int i = 0; i < program.size(); i++) {
+            if (program.instruction(i) instanceof Instruction.Call call && call.isCircular()) {
+                calls.set(i);
+            }
+        }
+        return calls;
     }
 
     /** Writes the methods and says how {@code compute} is called. */

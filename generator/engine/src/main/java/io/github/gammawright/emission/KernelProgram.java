@@ -27,7 +27,7 @@ record KernelProgram(StraightLineProgram program, List<List<Integer>> slots, Lis
         StraightLineProgram domain = model.domain().program();
         int[] numbers = new int[domain.size()];
         for (int i = 0; i < numbers.length; i++) {
-            Instruction instruction = renumbered(domain.instruction(i), numbers);
+            Instruction instruction = domain.instruction(i).renumbered(operand -> numbers[operand]);
             Integer number = known.get(instruction);
             if (number == null) {
                 number = instructions.size();
@@ -49,23 +49,6 @@ record KernelProgram(StraightLineProgram program, List<List<Integer>> slots, Lis
                 new StraightLineProgram(instructions, names, List.of()),
                 model.results().stream().map(KernelModel.Result::slots).toList(),
                 List.copyOf(conditions));
-    }
-
-    private static Instruction renumbered(Instruction instruction, int[] numbers) {
-        if (instruction instanceof Instruction.Arithmetic a) {
-            return new Instruction.Arithmetic(a.operator(), numbers[a.left()], numbers[a.right()]);
-        }
-        if (instruction instanceof Instruction.MultiplyAdd m) {
-            return new Instruction.MultiplyAdd(numbers[m.left()], numbers[m.right()], numbers[m.addend()]);
-        }
-        if (instruction instanceof Instruction.Negation n) {
-            return new Instruction.Negation(numbers[n.operand()]);
-        }
-        if (instruction instanceof Instruction.Call c) {
-            return new Instruction.Call(
-                    c.function(), c.operands().stream().map(o -> numbers[o]).toList());
-        }
-        return instruction;
     }
 
     Instruction instruction(int number) {

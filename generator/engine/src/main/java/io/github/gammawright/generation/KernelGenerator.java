@@ -11,6 +11,7 @@ import io.github.gammawright.geometry.Route;
 import io.github.gammawright.graph.StraightLineProgram;
 import io.github.gammawright.optimiser.FusedOperations;
 import io.github.gammawright.optimiser.Optimiser;
+import io.github.gammawright.optimiser.Schedule;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -59,6 +60,7 @@ public final class KernelGenerator {
         if (shared) {
             stages.add(new CostReport.Stage("shared trigonometry", program.countWithSharedTrigonometry()));
         }
+        program = Schedule.of(program);
         KernelModel model = KernelModels.of(
                         definition, specification, origin.zero(), program, DomainProgram.of(definition))
                 .withSharedTrigonometry(shared);

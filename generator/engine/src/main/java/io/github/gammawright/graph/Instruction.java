@@ -1,6 +1,7 @@
 package io.github.gammawright.graph;
 
 import java.util.List;
+import java.util.function.IntUnaryOperator;
 import org.hipparchus.fraction.BigFraction;
 
 /** One step of a {@link StraightLineProgram}; operands are the numbers of earlier instructions. */
@@ -8,6 +9,29 @@ public sealed interface Instruction {
 
     /** The numbers of the instructions whose values this one uses, in their order. */
     List<Integer> operands();
+
+    /**
+     * The same step on other operands.
+     *
+     * @param numbers gives for each operand the one that takes its place
+     */
+    default Instruction renumbered(IntUnaryOperator numbers) {
+        if (this instanceof Arithmetic a) {
+            return new Arithmetic(a.operator(), numbers.applyAsInt(a.left()), numbers.applyAsInt(a.right()));
+        }
+        if (this instanceof MultiplyAdd m) {
+            return new MultiplyAdd(
+                    numbers.applyAsInt(m.left()), numbers.applyAsInt(m.right()), numbers.applyAsInt(m.addend()));
+        }
+        if (this instanceof Negation n) {
+            return new Negation(numbers.applyAsInt(n.operand()));
+        }
+        if (this instanceof Call c) {
+            return new Call(
+                    c.function(), c.operands().stream().map(numbers::applyAsInt).toList());
+        }
+        return this;
+    }
 
     /** A value given to the evaluation. */
     record Load(Symbol symbol) implements Instruction {

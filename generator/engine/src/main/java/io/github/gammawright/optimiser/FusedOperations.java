@@ -144,7 +144,7 @@ public final class FusedOperations {
                 }
                 instruction = new Instruction.MultiplyAdd(left, numbers.get(factors.right()), other);
             } else {
-                instruction = renumbered(instruction, numbers);
+                instruction = instruction.renumbered(numbers::get);
             }
             numbers.put(i, instructions.size());
             instructions.add(instruction);
@@ -169,19 +169,5 @@ public final class FusedOperations {
             instructions.add(new Instruction.Negation(n));
             return instructions.size() - 1;
         });
-    }
-
-    private static Instruction renumbered(Instruction instruction, Map<Integer, Integer> numbers) {
-        if (instruction instanceof Instruction.Arithmetic a) {
-            return new Instruction.Arithmetic(a.operator(), numbers.get(a.left()), numbers.get(a.right()));
-        }
-        if (instruction instanceof Instruction.Negation n) {
-            return new Instruction.Negation(numbers.get(n.operand()));
-        }
-        if (instruction instanceof Instruction.Call c) {
-            return new Instruction.Call(
-                    c.function(), c.operands().stream().map(numbers::get).toList());
-        }
-        return instruction;
     }
 }

@@ -10,6 +10,8 @@ import io.github.gammawright.generation.KernelSpecification;
 import io.github.gammawright.generation.Mistakes;
 import io.github.gammawright.geometry.Quantity;
 import io.github.gammawright.verification.CheckSettings;
+import io.github.gammawright.verification.DefinitionReport;
+import io.github.gammawright.verification.DefinitionTable;
 import io.github.gammawright.verification.KernelReport;
 import io.github.gammawright.verification.ReportJson;
 import io.github.gammawright.verification.ReportTable;
@@ -27,14 +29,16 @@ import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 
-/** Compares kernels with the reference. */
+/** Compares kernels with the reference, tries identities between them and examines the claims of definitions. */
 @Command(
         name = "check",
-        description = "Compares every kernel with a high-precision reference.",
+        description =
+                "Compares every kernel with a high-precision reference, tries the identities between them, and proves or"
+                        + " refutes what the definition claims.",
         footer = {
             "Each quantity is checked in a class of its own, and so is each class of the [[kernel]] tables. The classes",
-            "are compiled in memory, and nothing is written. The status is 1 if a class is out of bounds, or could not",
-            "be compared at all."
+            "are compiled in memory, and nothing is written. The status is 1 if a class is out of bounds or could not be",
+            "compared at all, if an identity fails, or if a claim is false."
         })
 final class CheckCommand implements Callable<Integer> {
 
@@ -75,11 +79,14 @@ final class CheckCommand implements Callable<Integer> {
             throw new WrongInputException("--points needs at least 1, not " + points);
         }
         Map<MetricDefinition, Set<KernelSpecification>> plan = plan(DefinitionArguments.read(arguments));
-        List<KernelReport> reports = check(plan);
+        List<KernelReport> reports = new ArrayList<>();
+        List<DefinitionReport> definitions = new ArrayList<>();
+        check(plan, reports, definitions);
         if (json) {
-            terminal.out().print(ReportJson.of(reports));
+            terminal.out().print(ReportJson.of(reports, definitions));
         }
-        boolean allPassed = reports.stream().allMatch(report -> report.verdict() == KernelReport.Verdict.PASSED);
+        boolean allPassed = reports.stream().allMatch(report -> report.verdict() == KernelReport.Verdict.PASSED)
+                && definitions.stream().allMatch(DefinitionReport::passed);
         return allPassed ? ExitStatus.DONE : ExitStatus.FELL_SHORT;
     }
 
@@ -126,11 +133,13 @@ final class CheckCommand implements Callable<Integer> {
                 generation.prefer());
     }
 
-    private List<KernelReport> check(Map<MetricDefinition, Set<KernelSpecification>> plan) {
+    private void check(
+            Map<MetricDefinition, Set<KernelSpecification>> plan,
+            List<KernelReport> reports,
+            List<DefinitionReport> definitions) {
         CheckSettings settings = CheckSettings.DEFAULT.withPoints(points).withSeed(seed);
         Mistakes mistakes = new Mistakes();
-        List<KernelReport> reports = new ArrayList<>();
-        int total = plan.values().stream().mapToInt(Set::size).sum();
+        int total = plan.values().stream().mapToInt(Set::size).sum() + plan.size();
         try (Progress progress = new Progress(terminal, total)) {
             plan.forEach((definition, kernels) -> {
                 CheckRun run = new CheckRun(definition, settings);
@@ -139,18 +148,23 @@ final class CheckCommand implements Callable<Integer> {
                     mistakes.attempt(() -> run.check(kernel)).ifPresent(report -> {
                         reports.add(report);
                         progress.clear();
-                        print(report);
+                        print(ReportTable.of(List.of(report)));
                     });
                 }
+                progress.next("identities and claims of " + definition.name());
+                mistakes.attempt(run::definition).ifPresent(report -> {
+                    definitions.add(report);
+                    progress.clear();
+                    print(DefinitionTable.of(report));
+                });
             });
         }
         mistakes.throwIfAny();
-        return reports;
     }
 
-    private void print(KernelReport report) {
+    private void print(String report) {
         if (!json) {
-            terminal.out().println(ReportTable.of(List.of(report)));
+            terminal.out().println(report);
             terminal.out().flush();
         }
     }

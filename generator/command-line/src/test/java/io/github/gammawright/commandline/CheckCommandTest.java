@@ -71,6 +71,48 @@ class CheckCommandTest {
     }
 
     @Test
+    void triesIdentitiesAndProvesClaims() {
+        Program run = Program.run("check", "sphere", "--points", "6", "--effort", "quick");
+
+        assertThat(run.output())
+                .contains("sphere: passed\n")
+                .containsPattern("Euler–Lagrange +a\\^k \\+ Γ\\^k_ij u\\^i u\\^j +\\d+ +\\S+ +passed")
+                .containsPattern("conservation of u_phi .* passed")
+                .containsPattern("signature = \"\\+\\+\" +\\d+ +tested")
+                .contains("the metric does not depend on phi");
+        assertThat(run.status()).isZero();
+    }
+
+    @Test
+    void aFalseClaimFallsShortWithACounterExample() throws IOException {
+        Path file = Files.writeString(temporary.resolve("bowl.metric.toml"), """
+                name = "bowl"
+                coordinates = ["x", "y"]
+                line-element = "(1 + x^2)*dx^2 + dy^2"
+                [claims]
+                independent-of = ["x"]
+                vacuum = true
+                [[kernel]]
+                quantities = ["metric"]
+                """);
+
+        Program run = Program.run("check", file.toString(), "--points", "6", "--effort", "quick");
+
+        assertThat(run.output())
+                .contains("kernels.BowlMetric: passed", "bowl: failed\n")
+                .containsPattern("vacuum = true +\\d+ +proved")
+                .containsPattern("independent-of x +\\d+ +refuted")
+                .containsPattern("counter-example to independent-of x: ∂_x g\\[0, 0\\] = \\S+ at \\[");
+        assertThat(run.status()).isEqualTo(1);
+
+        Program json = Program.run("check", file.toString(), "--points", "6", "--effort", "quick", "--json");
+        assertThat(json.output())
+                .startsWith("{\"passed\": false,")
+                .contains("\"claim\": \"independent-of x\", \"verdict\": \"refuted\"");
+        assertThat(json.status()).isEqualTo(1);
+    }
+
+    @Test
     void whatCannotBeComparedFallsShort() throws IOException {
         Path file = Files.writeString(temporary.resolve("lens.metric.toml"), """
                 name = "lens"

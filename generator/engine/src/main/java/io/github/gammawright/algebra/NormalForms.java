@@ -81,6 +81,44 @@ public final class NormalForms {
         return form(node).map(form -> form.build(toTarget));
     }
 
+    /**
+     * Whether a sum of products of values of the source vanishes. Each factor is brought to its normal form by itself, so
+     * that the answer yes is a proof, where the graph's own zero is a matter of values at random points.
+     *
+     * @return true if the normal form of the sum is 0, false if it isn't; empty if the budget ran out
+     */
+    public Optional<Boolean> vanishes(List<Term> sum) {
+        List<Node> factors = sum.stream().flatMap(term -> term.factors().stream()).toList();
+        try {
+            WorkMeter meter = new WorkMeter(budget);
+            Generators needed = Generators.of(factors, Set.of(), meter);
+            if (conversion == null || !conversion.generators().covers(needed)) {
+                prepare(factors, meter);
+            }
+            FunctionField field = conversion.field();
+            field.polynomials().meter(meter);
+            List<Fraction> terms = new ArrayList<>();
+            for (Term term : sum) {
+                Fraction product = field.constant(term.coefficient());
+                for (Node factor : term.factors()) {
+                    product = field.multiply(product, conversion.convert(factor));
+                }
+                terms.add(product);
+            }
+            return Optional.of(field.cancel(field.sum(terms)).isZero());
+        } catch (BudgetExceededException | ArithmeticException e) {
+            return Optional.empty();
+        }
+    }
+
+    /** A product with a rational coefficient. */
+    public record Term(BigFraction coefficient, List<Node> factors) {
+
+        public Term {
+            factors = List.copyOf(factors);
+        }
+    }
+
     /** A certified form of a value. */
     Optional<FactoredForm> form(Node node) {
         try {
@@ -109,16 +147,17 @@ public final class NormalForms {
         WorkMeter meter = new WorkMeter(budget);
         Generators needed = Generators.of(List.of(node), Set.of(), meter);
         if (conversion == null || !conversion.generators().covers(needed)) {
-            prepare(needed, node, meter);
+            prepare(List.of(node), meter);
         }
         conversion.field().polynomials().meter(meter);
         return conversion.field().cancel(conversion.convert(node));
     }
 
-    /** Makes a field for the generators of a value and those that were there before, if they are not too many. */
-    private void prepare(Generators needed, Node node, WorkMeter meter) {
+    /** Makes a field for the generators of some values, and for the abbreviations that need no others. */
+    private void prepare(List<Node> values, WorkMeter meter) {
+        Generators needed = Generators.of(values, Set.of(), meter);
         List<Node> named = new ArrayList<>();
-        List<Node> roots = new ArrayList<>(List.of(node));
+        List<Node> roots = new ArrayList<>(values);
         for (Node candidate : source.names().keySet()) {
             if (needed.coversButForPartners(Generators.of(List.of(candidate), Set.of(), meter), source)) {
                 named.add(candidate);

@@ -47,6 +47,28 @@ public final class MetricGraphBuilder {
         return new MetricGraphBuilder(definition, points).build();
     }
 
+    /** A metric, and the values of further expressions of its definition in the same graph. */
+    public record WithExpressions(MetricGraph metric, List<Node> expressions) {
+
+        public WithExpressions {
+            expressions = List.copyOf(expressions);
+        }
+    }
+
+    /**
+     * The graph of a definition's metric, with further expressions of the definition.
+     *
+     * @param expressions free of differentials
+     * @throws UndefinedValueException where an expression has no value anywhere
+     */
+    public static WithExpressions build(MetricDefinition definition, List<Expression> expressions) {
+        MetricGraphBuilder builder = new MetricGraphBuilder(definition, DomainPoints.draw(definition));
+        List<Node> values = expressions.stream()
+                .map(expression -> builder.scope.translator().translate(expression))
+                .toList();
+        return new WithExpressions(builder.build(), values);
+    }
+
     private MetricGraph build() {
         if (definition.form() instanceof MetricForm.LineElement lineElement) {
             return lineElement(lineElement.expression());

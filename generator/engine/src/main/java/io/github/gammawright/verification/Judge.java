@@ -9,7 +9,7 @@ final class Judge {
     private static final double SMALL = 1e-3;
 
     /** What a component that is zero may come out as, in parts of the largest one. */
-    private static final double NOISE = 1e-14;
+    static final double NOISE = 1e-14;
 
     /** The relative bound does not forbid errors of this part of the bound in conditioning limits. */
     private static final double NATURE = 1e-2;

@@ -27,6 +27,7 @@ public final class KernelCheck {
     private final MetricDefinition definition;
     private final CheckSettings settings;
     private final ReferenceEvaluator evaluator;
+    private final IdentityCheck identities;
     private DomainSample sample;
 
     /** A check of kernels of that definition. */
@@ -34,6 +35,7 @@ public final class KernelCheck {
         this.definition = definition;
         this.settings = settings;
         this.evaluator = new ReferenceEvaluator(definition, settings.digits());
+        this.identities = new IdentityCheck(evaluator, settings);
     }
 
     /**
@@ -57,6 +59,15 @@ public final class KernelCheck {
             report.defect(defect.getMessage());
         }
         return report.build();
+    }
+
+    /**
+     * Tries the identities between the classes of single quantities that have been checked so far.
+     *
+     * @param cyclic the coordinates, by number, of which the metric is free
+     */
+    public List<IdentityReport> identities(List<Integer> cyclic) {
+        return identities.reports(sample().points(), cyclic);
     }
 
     private DomainSample sample() {
@@ -108,6 +119,9 @@ public final class KernelCheck {
             for (QuantityComparison comparison : comparisons) {
                 comparison.compare(trio, point, inputs, vectors);
             }
+        }
+        if (CheckedKernel.fits(kernel)) {
+            identities.add(new CheckedKernel(kernel, instance, evaluator));
         }
         comparisons.forEach(comparison -> report.quantity(comparison.report()));
     }

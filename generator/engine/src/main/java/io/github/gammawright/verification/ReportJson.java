@@ -4,20 +4,25 @@ import java.util.List;
 import java.util.Optional;
 
 /**
- * Prints reports as JSON (RFC 8259): an object whose member {@code kernels} holds an object for each report. Numbers that
- * JSON does not have, NaN and the infinities, are null.
+ * Prints reports as JSON (RFC 8259): an object whose member {@code kernels} holds an object for each class and whose member
+ * {@code definitions} holds one for each definition. Numbers that JSON does not have, NaN and the infinities, are null.
  */
 public final class ReportJson {
 
     private ReportJson() {}
 
     /** The text, ended by a line feed. */
-    public static String of(List<KernelReport> reports) {
+    public static String of(List<KernelReport> reports, List<DefinitionReport> definitions) {
         JsonWriter json = new JsonWriter();
         json.beginObject();
-        json.key("passed").value(reports.stream().noneMatch(report -> report.verdict() == KernelReport.Verdict.FAILED));
+        json.key("passed")
+                .value(reports.stream().allMatch(report -> report.verdict() == KernelReport.Verdict.PASSED)
+                        && definitions.stream().allMatch(DefinitionReport::passed));
         json.key("kernels").beginArray();
         reports.forEach(report -> kernel(json, report));
+        json.endArray();
+        json.key("definitions").beginArray();
+        definitions.forEach(new DefinitionJson(json)::add);
         json.endArray();
         json.endObject();
         return json + "\n";

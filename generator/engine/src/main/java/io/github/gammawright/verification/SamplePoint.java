@@ -16,6 +16,11 @@ public final class SamplePoint {
         this.edge = edge;
     }
 
+    /** The same coordinates with other parameters. */
+    public SamplePoint withParameters(double[] others) {
+        return new SamplePoint(others, coordinates, edge);
+    }
+
     /** A copy of the parameters, in declared order. */
     public double[] parameters() {
         return parameters.clone();

@@ -82,7 +82,7 @@ class ReportTest {
         String worst =
                 "{\"indices\": [1, 2, 2], \"parameters\": [1.0, 0.5], \"point\": [0.0, 3.25], \"inputs\": [[0.25]],"
                         + " \"expected\": 2.0, \"actual\": 2.5, \"ulps\": 1.1E15, \"limits\": 4.0E14}";
-        assertThat(ReportJson.of(List.of(FAILED, NOT_CHECKED)))
+        assertThat(ReportJson.of(List.of(FAILED, NOT_CHECKED), List.of()))
                 .isEqualTo("{\"passed\": false, \"kernels\": [{\"class\": \"kernels.Trial\","
                         + " \"definition\": \"a \\\"quoted\\\" \\\\ name\\u000a\\u03a3\", \"verdict\": \"failed\","
                         + " \"points\": 70, \"edgePoints\": 10, \"seed\": 1, \"digits\": 50,"
@@ -101,6 +101,6 @@ class ReportTest {
                         + " \"points\": 0, \"edgePoints\": 0, \"seed\": 1, \"digits\": 50,"
                         + " \"relativeBound\": 1.0E-11, \"limitMultiple\": 1000.0,"
                         + " \"notChecked\": \"there is no point\", \"defects\": [], \"notes\": [], \"warnings\": [],"
-                        + " \"largestMethod\": null, \"quantities\": []}]}\n");
+                        + " \"largestMethod\": null, \"quantities\": []}], \"definitions\": []}\n");
     }
 }

@@ -6,6 +6,7 @@ import io.github.gammawright.generation.CheckRun;
 import io.github.gammawright.generation.KernelSpecification;
 import io.github.gammawright.generation.Mistakes;
 import io.github.gammawright.verification.CheckSettings;
+import io.github.gammawright.verification.DefinitionTable;
 import io.github.gammawright.verification.KernelReport;
 import io.github.gammawright.verification.KernelReport.Verdict;
 import io.github.gammawright.verification.ReportTable;
@@ -15,7 +16,7 @@ import java.util.SortedMap;
 import org.apache.maven.plugin.MojoFailureException;
 import org.apache.maven.plugin.logging.Log;
 
-/** Checks the classes of definitions, and reports each. */
+/** Checks the classes of definitions, the identities between them and the definitions' claims, and reports each. */
 final class CheckedKernels {
 
     private final BuildSettings settings;
@@ -32,6 +33,7 @@ final class CheckedKernels {
         BuildPlan plan = ReadDefinitions.read(definitions).plan(settings);
         Mistakes mistakes = new Mistakes();
         int failed = 0;
+        int failedDefinitions = 0;
         for (BuildPlan.Part part : plan.parts()) {
             CheckRun run = new CheckRun(part.definition(), checks);
             for (KernelSpecification kernel : part.kernels()) {
@@ -40,18 +42,29 @@ final class CheckedKernels {
                         .map(passed -> passed ? 0 : 1)
                         .orElse(0);
             }
+            failedDefinitions += mistakes.attempt(run::definition)
+                    .map(report -> log(DefinitionTable.of(report), report.passed()) ? 0 : 1)
+                    .orElse(0);
         }
         mistakes.throwIfAny();
         if (failed > 0) {
             throw new MojoFailureException(
                     failed + " of " + plan.kernelCount() + " kernels did not pass the check; the reports are above");
         }
+        if (failedDefinitions > 0) {
+            throw new MojoFailureException("claims or identities of " + failedDefinitions + " of "
+                    + plan.parts().size() + " definitions are false; the reports are above");
+        }
     }
 
     /** Whether the class passed. */
     private boolean report(KernelReport report) {
         boolean passed = report.verdict() == Verdict.PASSED;
-        for (String line : ReportTable.of(List.of(report)).split("\n")) {
+        return log(ReportTable.of(List.of(report)), passed);
+    }
+
+    private boolean log(String report, boolean passed) {
+        for (String line : report.split("\n")) {
             if (passed) {
                 log.info(line);
             } else {

@@ -59,6 +59,11 @@ public final class ReferencePoint {
         return List.copyOf(values);
     }
 
+    /** What vanishes here if statements about the metric hold. */
+    public ReferenceResiduals residuals() {
+        return new ReferenceResiduals(plainSeries(ReferenceResiduals.order(definition.dimension())));
+    }
+
     /** The components of a quantity with their conditioning limits, by one order more of the series. */
     public Conditioned conditioned(ReferenceQuantity quantity, double[]... inputs) {
         requireInputs(quantity, inputs);

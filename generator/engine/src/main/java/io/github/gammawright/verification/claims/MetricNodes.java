@@ -187,7 +187,7 @@ final class MetricNodes {
     }
 
     private Geometry geometry() {
-        return new Geometry(metric, new Route(Route.Inversion.BLOCKS, Route.Flow.COMPONENTS));
+        return new Geometry(metric, Route.candidates(metric, List.of()).get(0));
     }
 
     static Term term(int coefficient, Node... factors) {

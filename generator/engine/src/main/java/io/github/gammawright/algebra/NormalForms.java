@@ -88,7 +88,8 @@ public final class NormalForms {
      * @return true if the normal form of the sum is 0, false if it isn't; empty if the budget ran out
      */
     public Optional<Boolean> vanishes(List<Term> sum) {
-        List<Node> factors = sum.stream().flatMap(term -> term.factors().stream()).toList();
+        List<Node> factors =
+                sum.stream().flatMap(term -> term.factors().stream()).toList();
         try {
             WorkMeter meter = new WorkMeter(budget);
             Generators needed = Generators.of(factors, Set.of(), meter);

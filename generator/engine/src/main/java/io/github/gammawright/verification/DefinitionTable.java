@@ -67,7 +67,10 @@ public final class DefinitionTable {
         rows.add(List.of("claim", "points", "verdict", "because"));
         for (ClaimReport claim : claims) {
             rows.add(List.of(
-                    VisibleText.of(claim.claim()), Integer.toString(claim.points()), claim.verdict().text(), VisibleText.of(claim.explanation())));
+                    VisibleText.of(claim.claim()),
+                    Integer.toString(claim.points()),
+                    claim.verdict().text(),
+                    VisibleText.of(claim.explanation())));
         }
         table(rows, text);
         for (ClaimReport claim : claims) {

@@ -58,8 +58,7 @@ final class FlowCheck {
         tallies.add(new Tally("conservation of g(u,u)", "g_ij u^i u^j along a geodesic, end − start"));
         for (int k : cyclic) {
             String name = coordinates.get(k);
-            tallies.add(new Tally(
-                    "conservation of u_" + name, "g_kj u^j along a geodesic, end − start, k = " + name));
+            tallies.add(new Tally("conservation of u_" + name, "g_kj u^j along a geodesic, end − start, k = " + name));
         }
         for (int p = 0; p < points.size(); p++) {
             if (!points.get(p).isAtEdge()) {

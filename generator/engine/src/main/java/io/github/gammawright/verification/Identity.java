@@ -50,9 +50,8 @@ enum Identity {
         void residuals(IdentityPoint at, double[] u, Residuals out) throws Defect {
             Approximate[] derivative = at.of(Quantity.METRIC_DERIVATIVE);
             Approximate[] gamma = at.of(Quantity.CHRISTOFFEL_FIRST_KIND);
-            out.tensor((k, i, j) -> derivative[out.at(k, i, j)]
-                    .minus(gamma[out.at(i, k, j)])
-                    .minus(gamma[out.at(j, k, i)]));
+            out.tensor((k, i, j) ->
+                    derivative[out.at(k, i, j)].minus(gamma[out.at(i, k, j)]).minus(gamma[out.at(j, k, i)]));
         }
     },
 
@@ -65,8 +64,8 @@ enum Identity {
             Approximate[] g = at.of(Quantity.METRIC);
             Approximate[] gamma = at.of(Quantity.CHRISTOFFEL);
             Approximate[] first = at.of(Quantity.CHRISTOFFEL_FIRST_KIND);
-            out.tensor((k, i, j) -> out.sum(m -> g[out.at(k, m)].times(gamma[out.at(m, i, j)]))
-                    .minus(first[out.at(k, i, j)]));
+            out.tensor((k, i, j) ->
+                    out.sum(m -> g[out.at(k, m)].times(gamma[out.at(m, i, j)])).minus(first[out.at(k, i, j)]));
         }
     },
 
@@ -75,13 +74,15 @@ enum Identity {
         void residuals(IdentityPoint at, double[] u, Residuals out) throws Defect {
             Approximate[] gamma = at.of(Quantity.CHRISTOFFEL);
             // They are one number, so that not even rounding is allowed for.
-            out.tensor((k, i, j) ->
-                    Approximate.exactly(gamma[out.at(k, i, j)].value() - gamma[out.at(k, j, i)].value()));
+            out.tensor(
+                    (k, i, j) -> Approximate.exactly(gamma[out.at(k, i, j)].value() - gamma[out.at(k, j, i)].value()));
         }
     },
 
-    TRACE("trace", "Γ^m_mk − ½ g^ij ∂_k g_ij", List.of(
-            Quantity.CHRISTOFFEL, Quantity.INVERSE_METRIC, Quantity.METRIC_DERIVATIVE)) {
+    TRACE(
+            "trace",
+            "Γ^m_mk − ½ g^ij ∂_k g_ij",
+            List.of(Quantity.CHRISTOFFEL, Quantity.INVERSE_METRIC, Quantity.METRIC_DERIVATIVE)) {
         @Override
         void residuals(IdentityPoint at, double[] u, Residuals out) throws Defect {
             Approximate[] gamma = at.of(Quantity.CHRISTOFFEL);
@@ -93,8 +94,10 @@ enum Identity {
         }
     },
 
-    TRACE_OF_CONNECTION("trace of the connection", "Γ^m_mk, alone − summed", List.of(
-            Quantity.CHRISTOFFEL, Quantity.CHRISTOFFEL_TRACE)) {
+    TRACE_OF_CONNECTION(
+            "trace of the connection",
+            "Γ^m_mk, alone − summed",
+            List.of(Quantity.CHRISTOFFEL, Quantity.CHRISTOFFEL_TRACE)) {
         @Override
         void residuals(IdentityPoint at, double[] u, Residuals out) throws Defect {
             Approximate[] gamma = at.of(Quantity.CHRISTOFFEL);
@@ -103,20 +106,22 @@ enum Identity {
         }
     },
 
-    CONTRACTION("contraction", "g^ij Γ^k_ij, alone − summed", List.of(
-            Quantity.CHRISTOFFEL, Quantity.INVERSE_METRIC, Quantity.CONTRACTED_CHRISTOFFEL)) {
+    CONTRACTION(
+            "contraction",
+            "g^ij Γ^k_ij, alone − summed",
+            List.of(Quantity.CHRISTOFFEL, Quantity.INVERSE_METRIC, Quantity.CONTRACTED_CHRISTOFFEL)) {
         @Override
         void residuals(IdentityPoint at, double[] u, Residuals out) throws Defect {
             Approximate[] gamma = at.of(Quantity.CHRISTOFFEL);
             Approximate[] inverse = at.of(Quantity.INVERSE_METRIC);
             Approximate[] contracted = at.of(Quantity.CONTRACTED_CHRISTOFFEL);
-            out.vector(k -> contracted[k].minus(
-                    out.sum(i -> out.sum(j -> inverse[out.at(i, j)].times(gamma[out.at(k, i, j)])))));
+            out.vector(k -> contracted[k].minus(out.sum(
+                    i -> out.sum(j -> inverse[out.at(i, j)].times(gamma[out.at(k, i, j)])))));
         }
     },
 
-    EULER_LAGRANGE("Euler–Lagrange", "a^k + Γ^k_ij u^i u^j", List.of(
-            Quantity.CHRISTOFFEL, Quantity.GEODESIC_ACCELERATION)) {
+    EULER_LAGRANGE(
+            "Euler–Lagrange", "a^k + Γ^k_ij u^i u^j", List.of(Quantity.CHRISTOFFEL, Quantity.GEODESIC_ACCELERATION)) {
         @Override
         void residuals(IdentityPoint at, double[] u, Residuals out) throws Defect {
             Approximate[] gamma = at.of(Quantity.CHRISTOFFEL);
@@ -126,8 +131,10 @@ enum Identity {
         }
     },
 
-    HAMILTON_LAGRANGE("Hamilton = Lagrange", "dx^i/dλ − u^i, then dp_i/dλ − ½ ∂_i g_jk u^j u^k, at p_i = g_ij u^j", List.of(
-            Quantity.METRIC, Quantity.INVERSE_METRIC, Quantity.METRIC_DERIVATIVE, Quantity.HAMILTONIAN_FLOW)) {
+    HAMILTON_LAGRANGE(
+            "Hamilton = Lagrange",
+            "dx^i/dλ − u^i, then dp_i/dλ − ½ ∂_i g_jk u^j u^k, at p_i = g_ij u^j",
+            List.of(Quantity.METRIC, Quantity.INVERSE_METRIC, Quantity.METRIC_DERIVATIVE, Quantity.HAMILTONIAN_FLOW)) {
         @Override
         void residuals(IdentityPoint at, double[] u, Residuals out) throws Defect {
             int n = out.dimension();
@@ -150,8 +157,8 @@ enum Identity {
                 velocity[i] = Approximate.exactly(u[i]).plus(out.sum(j -> inverse[out.at(row, j)].times(error[j])));
             }
             out.vector(i -> flow[i].minus(velocity[i]));
-            out.vector(i -> flow[n + i].minus(out.sum(
-                            j -> out.sum(k -> derivative[out.at(i, j, k)].times(velocity[j]).times(velocity[k])))
+            out.vector(i -> flow[n + i].minus(out.sum(j -> out.sum(
+                            k -> derivative[out.at(i, j, k)].times(velocity[j]).times(velocity[k])))
                     .times(0.5)));
         }
     };

@@ -19,8 +19,7 @@ final class IdentityPoint {
     private final SamplePoint point;
     private final Map<Quantity, Approximate[]> known = new HashMap<>();
 
-    IdentityPoint(
-            Map<Quantity, CheckedKernel> kernels, CheckSettings settings, ReferenceTrio trio, SamplePoint point) {
+    IdentityPoint(Map<Quantity, CheckedKernel> kernels, CheckSettings settings, ReferenceTrio trio, SamplePoint point) {
         this.kernels = kernels;
         this.settings = settings;
         this.trio = trio;
@@ -58,8 +57,7 @@ final class IdentityPoint {
                 }
                 error = values[i] == 0 ? 0 : Math.max(Judge.NOISE * largest, noise);
             } else {
-                error = settings.limitMultiple()
-                        * conditioned.limits().get(i).toDouble();
+                error = settings.limitMultiple() * conditioned.limits().get(i).toDouble();
             }
             components[i] = new Approximate(values[i], error);
         }

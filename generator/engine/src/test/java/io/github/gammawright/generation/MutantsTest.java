@@ -28,7 +28,8 @@ import org.junit.jupiter.api.Test;
 class MutantsTest {
 
     private static final int WANTED = 30;
-    private static final CheckSettings FEW_POINTS = CheckSettings.DEFAULT.withPoints(4).withEdgePoints(2);
+    private static final CheckSettings FEW_POINTS =
+            CheckSettings.DEFAULT.withPoints(4).withEdgePoints(2);
 
     private static final List<Quantity> CONNECTED = List.of(
             Quantity.METRIC,
@@ -73,7 +74,9 @@ class MutantsTest {
                     if (mutant.isPresent() && isCaught(check, underTest(original, mutant.get()))) {
                         caught.merge(mutation.name(), 1, Integer::sum);
                     } else {
-                        assertThat(mutant).as("%s in %s of %s", mutation.name(), quantity, name).isEmpty();
+                        assertThat(mutant)
+                                .as("%s in %s of %s", mutation.name(), quantity, name)
+                                .isEmpty();
                     }
                 }
             }
@@ -139,9 +142,9 @@ class MutantsTest {
             broken.put(wrong, failed);
         }
 
-        assertThat(broken).allSatisfy((quantity, identities) -> assertThat(identities)
-                .as("%s", quantity)
-                .isNotEmpty());
+        assertThat(broken)
+                .allSatisfy((quantity, identities) ->
+                        assertThat(identities).as("%s", quantity).isNotEmpty());
         // The wrong component is that of theta, which leaves the momentum along phi alone.
         assertThat(broken.get(Quantity.GEODESIC_ACCELERATION))
                 .containsExactly("Euler–Lagrange", "conservation of g(u,u)");
@@ -166,7 +169,8 @@ class MutantsTest {
 
     /** The class with the first value that it stores, of those that are not 0, twice as large. */
     private static String doubled(String source) {
-        Matcher store = Pattern.compile("(\\w+\\[[^\\]]+\\] = )(?!0\\.0;)([^;\\n]+);").matcher(source);
+        Matcher store =
+                Pattern.compile("(\\w+\\[[^\\]]+\\] = )(?!0\\.0;)([^;\\n]+);").matcher(source);
         assertThat(store.find(source.indexOf("private void compute("))).isTrue();
         return source.substring(0, store.start()) + store.group(1) + "2 * (" + store.group(2) + ");"
                 + source.substring(store.end());
@@ -193,8 +197,6 @@ class MutantsTest {
         GenerationOptions quick = new GenerationOptions(
                 GenerationOptions.Effort.QUICK, standard.trigonometry(), standard.fma(), standard.prefer());
         return new KernelGenerator()
-                .generate(
-                        definition,
-                        new KernelSpecification("trial", "Trial", List.of(quantity), Layout.FULL, quick));
+                .generate(definition, new KernelSpecification("trial", "Trial", List.of(quantity), Layout.FULL, quick));
     }
 }

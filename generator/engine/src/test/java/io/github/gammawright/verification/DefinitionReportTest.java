@@ -20,8 +20,8 @@ class DefinitionReportTest {
             2,
             Optional.of(new IdentityReport.Residual(List.of(1), List.of(1.0), List.of(0.5, 3.25), 6.5e-9, 1e-12)));
 
-    private static final ClaimReport PROVED =
-            new ClaimReport("vacuum = true", ClaimVerdict.PROVED, 24, "every component has the normal form 0", Optional.empty());
+    private static final ClaimReport PROVED = new ClaimReport(
+            "vacuum = true", ClaimVerdict.PROVED, 24, "every component has the normal form 0", Optional.empty());
 
     private static final ClaimReport REFUTED = new ClaimReport(
             "independent-of x\u202e",

@@ -52,8 +52,11 @@ public final class ClaimCheck {
                         "vacuum = " + expected,
                         expected,
                         new Statement(
-                                "R", 2, ReferenceResiduals::ricci, List.of(), Tensor.of(nodes -> nodes.einstein(
-                                        nodes.graph().zero()))))));
+                                "R",
+                                2,
+                                ReferenceResiduals::ricci,
+                                List.of(),
+                                Tensor.of(nodes -> nodes.einstein(nodes.graph().zero()))))));
         claims.signature().ifPresent(signature -> reports.add(signature(signature)));
         claims.independentOf().ifPresent(names -> names.forEach(name -> reports.add(independentOf(name))));
         claims.conformallyFlat().ifPresent(expected -> reports.add(conformallyFlat(expected)));
@@ -158,8 +161,11 @@ public final class ClaimCheck {
                 "killing (" + text + ")",
                 true,
                 new Statement(
-                        "(L_ξ g)", 2, residuals -> residuals.killing(field), field, (nodes, values) -> nodes.killing(
-                                values)));
+                        "(L_ξ g)",
+                        2,
+                        residuals -> residuals.killing(field),
+                        field,
+                        (nodes, values) -> nodes.killing(values)));
     }
 
     private ClaimReport independentOf(String name) {

@@ -35,8 +35,8 @@ final class ClaimPoints {
     ClaimPoints(ReferenceEvaluator evaluator, long seed) {
         this.evaluator = evaluator;
         this.finer = evaluator.finer(MORE_DIGITS);
-        this.points = varied(
-                new DomainSampler(evaluator, seed).draw(INSIDE, AT_EDGES).points(), seed);
+        this.points =
+                varied(new DomainSampler(evaluator, seed).draw(INSIDE, AT_EDGES).points(), seed);
     }
 
     private List<SamplePoint> varied(List<SamplePoint> drawn, long seed) {
@@ -75,8 +75,8 @@ final class ClaimPoints {
     Search search(String name, int rank, Function<ReferenceResiduals, List<Real>> residual) {
         int tried = 0;
         for (SamplePoint point : points) {
-            List<Real> coarse =
-                    residual.apply(evaluator.at(point.parameters(), point.coordinates()).residuals());
+            List<Real> coarse = residual.apply(
+                    evaluator.at(point.parameters(), point.coordinates()).residuals());
             boolean defined = coarse.stream().anyMatch(value -> !value.isUndefined()) || coarse.isEmpty();
             tried += defined ? 1 : 0;
             int component = nonZero(coarse, point, residual);
@@ -103,10 +103,10 @@ final class ClaimPoints {
         int largest = -1;
         for (int i = 0; i < coarse.size(); i++) {
             double value = coarse.get(i).toDouble();
-            boolean agrees =
-                    value != 0 && Math.abs(fine.get(i).toDouble() - value) <= AGREES * Math.abs(value);
+            boolean agrees = value != 0 && Math.abs(fine.get(i).toDouble() - value) <= AGREES * Math.abs(value);
             if (agrees
-                    && (largest < 0 || Math.abs(value) > Math.abs(coarse.get(largest).toDouble()))) {
+                    && (largest < 0
+                            || Math.abs(value) > Math.abs(coarse.get(largest).toDouble()))) {
                 largest = i;
             }
         }
@@ -116,9 +116,7 @@ final class ClaimPoints {
     /** The inertia of the metric at a point; empty where it is undefined or degenerate. */
     Optional<Inertia> inertia(SamplePoint point) {
         return Inertia.of(
-                evaluator
-                        .at(point.parameters(), point.coordinates())
-                        .values(ReferenceQuantity.METRIC),
+                evaluator.at(point.parameters(), point.coordinates()).values(ReferenceQuantity.METRIC),
                 definition().dimension());
     }
 

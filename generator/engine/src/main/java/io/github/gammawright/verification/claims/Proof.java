@@ -84,7 +84,8 @@ final class Proof {
         boolean occurs = false;
         for (Node[] row : nodes.metric().components()) {
             for (Node component : row) {
-                occurs |= nodes.graph().dependsOn(component, nodes.metric().coordinates().get(k));
+                occurs |= nodes.graph()
+                        .dependsOn(component, nodes.metric().coordinates().get(k));
                 if (!nodes.derivative(component, k).isZero()) {
                     return Outcome.OPEN;
                 }

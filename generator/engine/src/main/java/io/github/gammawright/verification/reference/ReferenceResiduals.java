@@ -46,9 +46,8 @@ public final class ReferenceResiduals {
         List<Real> residuals = new ArrayList<>();
         for (int i = 0; i < n; i++) {
             for (int j = 0; j < n; j++) {
-                residuals.add(ricci[i][j]
-                        .minus(lambda.times(geometry.metric()[i][j]))
-                        .value());
+                residuals.add(
+                        ricci[i][j].minus(lambda.times(geometry.metric()[i][j])).value());
             }
         }
         return residuals;

@@ -45,8 +45,8 @@ class ClaimCheckTest {
         ClaimReport report = only(sphere("vacuum = false"));
 
         assertThat(report.verdict()).isEqualTo(ClaimVerdict.PROVED);
-        assertThat(report.witness()).hasValueSatisfying(witness -> assertThat(witness.value())
-                .isNotZero());
+        assertThat(report.witness())
+                .hasValueSatisfying(witness -> assertThat(witness.value()).isNotZero());
     }
 
     /** R_ij = g_ij on the unit sphere, so that Λ = 1 (any textbook of Riemannian geometry; from memory). */
@@ -75,8 +75,9 @@ class ClaimCheckTest {
         for (String claim : List.of("vacuum = true", "independent-of = [\"r\"]", "signature = \"-++\"")) {
             ClaimReport report = only(spherical("r^2 + 1", claim));
             assertThat(report.verdict()).as(claim).isEqualTo(ClaimVerdict.REFUTED);
-            assertThat(report.witness()).as(claim).hasValueSatisfying(witness -> assertThat(witness.point())
-                    .hasSize(3));
+            assertThat(report.witness())
+                    .as(claim)
+                    .hasValueSatisfying(witness -> assertThat(witness.point()).hasSize(3));
         }
     }
 

@@ -27,11 +27,10 @@ class InertiaTest {
                     matrix[j][i] = matrix[i][j];
                 }
             }
-            double[] eigenvalues =
-                    new EigenDecompositionSymmetric(new Array2DRowRealMatrix(matrix)).getEigenvalues();
+            double[] eigenvalues = new EigenDecompositionSymmetric(new Array2DRowRealMatrix(matrix)).getEigenvalues();
             if (Arrays.stream(eigenvalues).allMatch(value -> Math.abs(value) > 1e-9)) {
-                int positive =
-                        (int) Arrays.stream(eigenvalues).filter(value -> value > 0).count();
+                int positive = (int)
+                        Arrays.stream(eigenvalues).filter(value -> value > 0).count();
                 assertThat(Inertia.of(reals(matrix), n))
                         .as(Arrays.deepToString(matrix))
                         .hasValue(new Inertia(positive, n - positive));

@@ -52,6 +52,11 @@ public final class ThistledownOrbit {
         return equation.state(point, velocity);
     }
 
+    /** The geodesic equation that the probe follows. */
+    GeodesicEquation equation() {
+        return equation;
+    }
+
     /** The covariant components of the velocity in a state: −energy, radial momentum, 0 and angular momentum. */
     public double[] momentum(double[] state) {
         double[] momentum = new double[DIMENSION];

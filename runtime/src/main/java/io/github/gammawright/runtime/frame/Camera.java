@@ -4,7 +4,8 @@ import java.util.Objects;
 
 /**
  * Where an observer's pixels look: a frame of four dimensions whose e_1 points forward, e_2 to the right and e_3 up in the
- * picture, and light of unit energy in that frame.
+ * picture, and light of unit energy in that frame. Forward, right and up are a left-handed triad: ask for
+ * {@link Handedness#LEFT} where the coordinates are right-handed, as t, r, θ, φ are.
  *
  * <p>A picture is made by following the light of each pixel back in time: integrate from {@link #incoming} towards smaller
  * parameters.

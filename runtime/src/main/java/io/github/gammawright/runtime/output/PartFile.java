@@ -5,6 +5,7 @@ import java.nio.file.AtomicMoveNotSupportedException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
+import java.util.UUID;
 
 /** A file that is written beside its place and moved there when it is whole. */
 final class PartFile {
@@ -16,7 +17,9 @@ final class PartFile {
         this.target = target.toAbsolutePath();
         Path folder = this.target.getParent();
         Files.createDirectories(folder);
-        this.part = Files.createTempFile(folder, target.getFileName() + ".", ".part");
+        // Not createTempFile: what it makes nobody else may read.
+        this.part = folder.resolve(target.getFileName() + "." + UUID.randomUUID() + ".part");
+        Files.createFile(part);
     }
 
     Path path() {

@@ -5,10 +5,11 @@ import io.github.gammawright.generation.GeneratedClass;
 import io.github.gammawright.graph.OperationCount;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.SortedSet;
 import java.util.TreeSet;
 
-/** The operation counts of a kernel, one line for each stage of its making. */
+/** Modelled cost, in additions, and operation counts of a kernel, one line for each stage of its making. */
 final class CostTable {
 
     private CostTable() {}
@@ -20,7 +21,7 @@ final class CostTable {
             functions.addAll(stage.count().functions().keySet());
         }
         List<String> heading =
-                new ArrayList<>(List.of(made.specification().className(), "operations", "+ −", "×", "/"));
+                new ArrayList<>(List.of(made.specification().className(), "cost", "operations", "+ −", "×", "/"));
         heading.addAll(functions);
         TextTable table = new TextTable().row(heading);
         for (CostReport.Stage stage : made.cost().stages()) {
@@ -33,6 +34,7 @@ final class CostTable {
         OperationCount count = stage.count();
         List<String> cells = new ArrayList<>(List.of(
                 stage.name(),
+                String.format(Locale.ROOT, "%.0f", stage.cost()),
                 Integer.toString(count.operations()),
                 Integer.toString(count.additions()),
                 Integer.toString(count.multiplications()),

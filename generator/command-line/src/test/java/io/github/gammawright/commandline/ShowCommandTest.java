@@ -19,7 +19,7 @@ class ShowCommandTest {
     void showsTheCostOfEachStage() {
         Program run = Program.run("show", "sphere", "--cost", "--quantity", "christoffel,metric");
 
-        assertThat(run.output().lines().filter(line -> line.matches("Sphere\\w+ +operations +\\+ − +× +/.*")))
+        assertThat(run.output().lines().filter(line -> line.matches("Sphere\\w+ +cost +operations +\\+ − +× +/.*")))
                 .hasSize(2);
         assertThat(run.output().lines().filter(line -> line.startsWith("resubstitution")))
                 .hasSize(2);

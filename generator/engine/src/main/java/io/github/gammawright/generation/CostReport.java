@@ -22,6 +22,7 @@ public record CostReport(List<Stage> stages) {
      *
      * @param name what was done
      * @param count the operations that remained
+     * @param cost what they cost by the optimiser's model, in additions
      */
-    public record Stage(String name, OperationCount count) {}
+    public record Stage(String name, OperationCount count, double cost) {}
 }

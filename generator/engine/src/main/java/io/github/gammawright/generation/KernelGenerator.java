@@ -9,6 +9,7 @@ import io.github.gammawright.geometry.FramePlan;
 import io.github.gammawright.geometry.MetricGraphBuilder;
 import io.github.gammawright.geometry.Route;
 import io.github.gammawright.graph.StraightLineProgram;
+import io.github.gammawright.optimiser.CostModel;
 import io.github.gammawright.optimiser.FusedOperations;
 import io.github.gammawright.optimiser.Optimiser;
 import io.github.gammawright.optimiser.Schedule;
@@ -49,23 +50,31 @@ public final class KernelGenerator {
         boolean shared = options.trigonometry() == GenerationOptions.Trigonometry.SHARED;
         StraightLineProgram program = outcome.program().program();
         List<CostReport.Stage> stages = new ArrayList<>();
-        stages.add(new CostReport.Stage(
-                "graph (" + origin.description() + ")",
-                origin.program().program().count()));
-        stages.add(new CostReport.Stage("resubstitution", program.count()));
+        stages.add(
+                stage("graph (" + origin.description() + ")", origin.program().program()));
+        stages.add(stage("resubstitution", program));
         if (options.fma()) {
             program = FusedOperations.of(program, DomainPoints.guard(definition, GUARD_POINTS));
-            stages.add(new CostReport.Stage("fused operations", program.count()));
-        }
-        if (shared) {
-            stages.add(new CostReport.Stage("shared trigonometry", program.countWithSharedTrigonometry()));
+            stages.add(stage("fused operations", program));
         }
         program = Schedule.of(program);
+        stages.add(stage("schedule", program));
+        if (shared) {
+            stages.add(new CostReport.Stage(
+                    "shared trigonometry",
+                    program.countWithSharedTrigonometry(),
+                    CostModel.standard().withSharedTrigonometry(program) / (double) CostModel.ADDITION));
+        }
         KernelModel model = KernelModels.of(
                         definition, specification, origin.zero(), program, DomainProgram.of(definition))
                 .withSharedTrigonometry(shared);
         return new GeneratedClass(
                 specification, KernelEmitter.emit(model), KernelEmitter.functions(model), new CostReport(stages));
+    }
+
+    private static CostReport.Stage stage(String name, StraightLineProgram program) {
+        double additions = CostModel.standard().of(program) / (double) CostModel.ADDITION;
+        return new CostReport.Stage(name, program.count(), additions);
     }
 
     private static long budget(GenerationOptions.Effort effort) {

@@ -15,6 +15,9 @@ import java.util.TreeMap;
  */
 public record OperationCount(int additions, int multiplications, int divisions, Map<String, Integer> functions) {
 
+    /** Sine and cosine of one argument, computed together. */
+    public static final String SINCOS = "sincos";
+
     public OperationCount {
         functions = java.util.Collections.unmodifiableMap(new TreeMap<>(functions));
     }

@@ -131,7 +131,7 @@ public final class StraightLineProgram {
         if (!angles.isEmpty()) {
             functions.remove(RealFunction.SIN.symbol());
             functions.remove(RealFunction.COS.symbol());
-            functions.put("sincos", angles.size());
+            functions.put(OperationCount.SINCOS, angles.size());
         }
         return new OperationCount(count.additions(), count.multiplications(), count.divisions(), functions);
     }

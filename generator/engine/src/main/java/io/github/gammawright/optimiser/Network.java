@@ -3,7 +3,6 @@ package io.github.gammawright.optimiser;
 import io.github.gammawright.graph.Instruction;
 import io.github.gammawright.graph.LoweredProgram;
 import io.github.gammawright.graph.PrimeField;
-import io.github.gammawright.graph.RealFunction;
 import io.github.gammawright.graph.StraightLineProgram;
 import java.util.Arrays;
 
@@ -24,11 +23,10 @@ final class Network {
     static final byte MULTIPLY = 3;
     static final byte DIVIDE = 4;
 
-    static final int COST_ADD = 4;
-    static final int COST_MULTIPLY = 4;
-    static final int COST_DIVIDE = 9;
-    private static final int COST_CALL = 100;
-    private static final int COST_ROOT = 24;
+    private static final CostModel COSTS = CostModel.standard();
+    static final int COST_ADD = COSTS.of(Instruction.Operator.ADD);
+    static final int COST_MULTIPLY = COSTS.of(Instruction.Operator.MULTIPLY);
+    static final int COST_DIVIDE = COSTS.of(Instruction.Operator.DIVIDE);
 
     static final int POINTS = 3;
     private static final PrimeField P = PrimeField.VALUES;
@@ -258,7 +256,7 @@ final class Network {
 
     private int callCost(int v) {
         if (program.instruction(origin[v]) instanceof Instruction.Call call) {
-            return call.function() == RealFunction.SQRT ? COST_ROOT : COST_CALL;
+            return COSTS.of(call.function());
         }
         return 0;
     }

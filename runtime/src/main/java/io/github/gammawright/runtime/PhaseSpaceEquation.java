@@ -24,9 +24,21 @@ public abstract sealed class PhaseSpaceEquation extends CurveEquation permits Ge
         double[] x = point;
         double[] v = vector;
         int n = x.length;
-        for (int i = 0; i < n; i++) {
-            x[i] = state[i];
-            v[i] = state[n + i];
+        if (n == 4) {
+            // Four dimensions, the common case, without the loop: a tenth of a fast kernel's time.
+            x[0] = state[0];
+            x[1] = state[1];
+            x[2] = state[2];
+            x[3] = state[3];
+            v[0] = state[4];
+            v[1] = state[5];
+            v[2] = state[6];
+            v[3] = state[7];
+        } else {
+            for (int i = 0; i < n; i++) {
+                x[i] = state[i];
+                v[i] = state[n + i];
+            }
         }
         derivatives(x, v, derivatives);
     }

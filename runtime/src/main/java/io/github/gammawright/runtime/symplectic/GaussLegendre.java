@@ -38,6 +38,7 @@ public final class GaussLegendre {
     private final double[][] k; // derivatives at the stages
     private final double[][] guess;
     private final double[] work;
+    private final double[] scale;
     private double parameter;
     private double parameterCompensation;
     private boolean fresh;
@@ -77,6 +78,7 @@ public final class GaussLegendre {
         k = new double[stages][length];
         guess = new double[stages][length];
         work = new double[length];
+        scale = new double[length];
     }
 
     /** The order of the method. */
@@ -167,6 +169,9 @@ public final class GaussLegendre {
     }
 
     private boolean iterate() {
+        for (int i = 0; i < length; i++) {
+            scale[i] = 1 / (1 + Math.abs(state[i]));
+        }
         double before = Double.POSITIVE_INFINITY;
         for (int round = 0; round < MAX_ITERATIONS; round++) {
             for (int s = 0; s < stages; s++) {
@@ -194,25 +199,39 @@ public final class GaussLegendre {
     private double update() {
         double largest = 0;
         for (int s = 0; s < stages; s++) {
-            double[] row = a[s];
-            double[] rest = low[s];
+            combine(low[s], a[s]);
             double[] zs = z[s];
             for (int i = 0; i < length; i++) {
-                double sum = 0;
-                for (int q = 0; q < stages; q++) {
-                    sum += rest[q] * k[q][i];
-                }
-                for (int q = 0; q < stages; q++) {
-                    sum += row[q] * k[q][i];
-                }
-                double value = step * sum;
-                double change = Math.abs(value - zs[i]) / (1 + Math.abs(state[i]));
+                double value = step * work[i];
+                double change = Math.abs(value - zs[i]) * scale[i];
                 // Written so that NaN is taken on.
                 largest = change <= largest ? largest : change;
                 zs[i] = value;
             }
         }
         return largest;
+    }
+
+    /** The stages' derivatives, summed with small weights first and then with large ones, into the work array. */
+    private void combine(double[] small, double[] large) {
+        double[] k0 = k[0];
+        double[] k1 = k[1];
+        double s0 = small[0];
+        double s1 = small[1];
+        double l0 = large[0];
+        double l1 = large[1];
+        if (stages == 2) {
+            for (int i = 0; i < work.length; i++) {
+                work[i] = s0 * k0[i] + s1 * k1[i] + l0 * k0[i] + l1 * k1[i];
+            }
+            return;
+        }
+        double[] k2 = k[2];
+        double s2 = small[2];
+        double l2 = large[2];
+        for (int i = 0; i < work.length; i++) {
+            work[i] = s0 * k0[i] + s1 * k1[i] + s2 * k2[i] + l0 * k0[i] + l1 * k1[i] + l2 * k2[i];
+        }
     }
 
     /** The parameter now. */

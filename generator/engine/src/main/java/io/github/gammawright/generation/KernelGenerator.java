@@ -20,7 +20,7 @@ import java.util.Optional;
 /** The way from a definition to a kernel class. */
 public final class KernelGenerator {
 
-    private static final int GUARD_POINTS = 32;
+    private static final int GUARD_POINTS = 192;
 
     /**
      * Makes a class.

@@ -9,6 +9,7 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.SplittableRandom;
 
 /**
@@ -19,6 +20,18 @@ public final class DomainPoints implements SamplePoints {
 
     private static final int FEW = 6;
     private static final int DRAWS = 20000;
+
+    /** Points without an edge in any direction, after which no edges are looked for. */
+    private static final int FRUITLESS = 4;
+
+    /** So many widths of its range a coordinate is moved to find an edge. */
+    private static final int FARTHEST = 4;
+
+    private static final int BISECTIONS = 60;
+
+    /** Powers of ten between the closest points to an edge and the farthest that count as close. */
+    private static final double CLOSEST = 7.5;
+
 
     private final List<Map<Symbol, Double>> points;
     private final SamplePoints others;
@@ -42,14 +55,24 @@ public final class DomainPoints implements SamplePoints {
         return points.isEmpty() ? SamplePoints.arbitrary(3) : new DomainPoints(definition, points);
     }
 
-    /** So many points of the domain, and as many again close to its edges and to those of the sample box. */
+    /**
+     * Twice so many points of the domain, those with even numbers from its sample box, as many of the others as there
+     * are close to edges.
+     */
     public static SamplePoints guard(MetricDefinition definition, int wanted) {
         Drawing drawing = new Drawing(definition);
-        List<Map<Symbol, Double>> points = drawing.points(wanted);
-        if (points.isEmpty()) {
+        List<Map<Symbol, Double>> inside = drawing.points(wanted);
+        if (inside.isEmpty()) {
             return SamplePoints.arbitrary(wanted);
         }
-        points.addAll(drawing.pressed(points));
+        List<Map<Symbol, Double>> pressed = drawing.pressed(inside, wanted);
+        List<Map<Symbol, Double>> points = new ArrayList<>();
+        for (int i = 0; i < inside.size(); i++) {
+            points.add(inside.get(i));
+            if (i < pressed.size()) {
+                points.add(pressed.get(i));
+            }
+        }
         return new DomainPoints(definition, points);
     }
 
@@ -84,35 +107,44 @@ public final class DomainPoints implements SamplePoints {
             return points;
         }
 
-        /** From each point one coordinate moved to just inside the edge of the domain that it meets first. */
-        List<Map<Symbol, Double>> pressed(List<Map<Symbol, Double>> inside) {
+        /** From each point each coordinate in turn moved to just inside the edge of the domain that it meets first. */
+        List<Map<Symbol, Double>> pressed(List<Map<Symbol, Double>> inside, int wanted) {
             List<Map<Symbol, Double>> pressed = new ArrayList<>();
             for (int i = 0; i < inside.size(); i++) {
-                Symbol coordinate =
-                        scope.coordinates().get(i % scope.coordinates().size());
-                boolean up = random.nextBoolean();
-                double start = inside.get(i).get(coordinate);
-                double width = range(coordinate).to() - range(coordinate).from();
-                double inner = start;
-                double outer = up ? start + width : start - width;
-                if (contains(moved(inside.get(i), coordinate, outer))) {
-                    continue;
+                if (i == FRUITLESS && pressed.isEmpty()) {
+                    break;
                 }
-                while (Math.abs(outer - inner) > 1e-12 * width) {
-                    double middle = 0.5 * (inner + outer);
-                    if (contains(moved(inside.get(i), coordinate, middle))) {
-                        inner = middle;
-                    } else {
-                        outer = middle;
+                for (Symbol coordinate : scope.coordinates()) {
+                    for (int direction = -1; direction <= 1; direction += 2) {
+                        pressed(inside.get(i), coordinate, direction).ifPresent(pressed::add);
+                        if (pressed.size() == wanted) {
+                            return pressed;
+                        }
                     }
-                }
-                double distance = Math.abs(inner - start) * StrictMath.pow(10, -1 - random.nextInt(6));
-                Map<Symbol, Double> point = moved(inside.get(i), coordinate, up ? inner - distance : inner + distance);
-                if (contains(point)) {
-                    pressed.add(point);
                 }
             }
             return pressed;
+        }
+
+        private Optional<Map<Symbol, Double>> pressed(Map<Symbol, Double> inside, Symbol coordinate, int direction) {
+            double start = inside.get(coordinate);
+            double width = range(coordinate).to() - range(coordinate).from();
+            double inner = start;
+            double outer = start + direction * FARTHEST * width;
+            if (contains(moved(inside, coordinate, outer))) {
+                return Optional.empty();
+            }
+            for (int step = 0; step < BISECTIONS; step++) {
+                double middle = 0.5 * (inner + outer);
+                if (contains(moved(inside, coordinate, middle))) {
+                    inner = middle;
+                } else {
+                    outer = middle;
+                }
+            }
+            double distance = Math.abs(inner - start) * StrictMath.pow(10, -1 - CLOSEST * random.nextDouble());
+            Map<Symbol, Double> point = moved(inside, coordinate, inner - direction * distance);
+            return contains(point) ? Optional.of(point) : Optional.empty();
         }
 
         private MetricDefinition.Range range(Symbol coordinate) {

@@ -1,6 +1,7 @@
 package io.github.gammawright.optimiser;
 
 import io.github.gammawright.graph.Instruction;
+import io.github.gammawright.graph.ProgramInterpreter;
 import io.github.gammawright.graph.RealFunction;
 import io.github.gammawright.graph.SamplePoints;
 import io.github.gammawright.graph.StraightLineProgram;
@@ -19,31 +20,29 @@ final class ExactOutputs {
 
     private static final int DIGITS = 42;
 
-    /** The outputs rounded to doubles; output, point. */
-    final double[][] high;
-
-    /** What the rounding left; output, point. */
-    final double[][] low;
+    /** The outputs; output, point. */
+    final DoubleDouble[][] value;
 
     /** The conditioning limits; output, point. */
     final double[][] limit;
 
+    private final SamplePoints points;
+
     ExactOutputs(StraightLineProgram program, SamplePoints points) {
+        this.points = points;
         int outputs = program.outputs().size();
-        high = new double[outputs][points.count()];
-        low = new double[outputs][points.count()];
+        value = new DoubleDouble[outputs][points.count()];
         limit = new double[outputs][points.count()];
         List<Symbol> symbols = program.symbols();
         DfpField field = new DfpField(DIGITS);
+        DoubleDouble[] constants = constants(program, field);
         for (int k = 0; k < points.count(); k++) {
-            Dfp[] exact = exact(program, field, points, k);
+            DoubleDouble[] exact = exact(program, field, constants, points, k);
             Gradient[] gradient = gradients(program, symbols, points, k);
             for (int o = 0; o < outputs; o++) {
                 int instruction = program.outputs().get(o);
-                high[o][k] = exact[instruction].toDouble();
-                low[o][k] =
-                        exact[instruction].subtract(field.newDfp(high[o][k])).toDouble();
-                double sum = Math.abs(high[o][k]);
+                value[o][k] = exact[instruction];
+                double sum = Math.abs(exact[instruction].high());
                 for (int m = 0; m < symbols.size(); m++) {
                     double partial = gradient[instruction].getPartialDerivative(m);
                     sum += Math.abs(points.value(symbols.get(m), k) * partial);
@@ -53,32 +52,77 @@ final class ExactOutputs {
         }
     }
 
-    private static Dfp[] exact(StraightLineProgram program, DfpField field, SamplePoints points, int k) {
-        Dfp[] values = new Dfp[program.size()];
+    /** The number of points. */
+    int points() {
+        return points.count();
+    }
+
+    /** The values of a program for these outputs at a point, in double arithmetic. */
+    double[] run(StraightLineProgram program, int point) {
+        return ProgramInterpreter.run(program, symbol -> points.value(symbol, point));
+    }
+
+    /** The worst errors of a program for these outputs, for each point in multiples of the limit. */
+    double[] errors(StraightLineProgram program) {
+        double[] errors = new double[points.count()];
+        for (int k = 0; k < errors.length; k++) {
+            double[] values = run(program, k);
+            for (int o = 0; o < value.length; o++) {
+                double actual = values[program.outputs().get(o)];
+                errors[k] = Math.max(
+                        errors[k], error(actual, value[o][k].high(), value[o][k].low(), limit[o][k]));
+            }
+        }
+        return errors;
+    }
+
+    /** How far a double is from the truth, in multiples of the limit; 0 where there is no finite truth. */
+    static double error(double actual, double high, double low, double limit) {
+        if (!Double.isFinite(limit) || !Double.isFinite(high)) {
+            return 0;
+        }
+        double difference = Math.abs(actual - high - low);
+        if (difference == 0) {
+            return 0;
+        }
+        return Double.isNaN(difference) ? Double.POSITIVE_INFINITY : difference / limit;
+    }
+
+    private static DoubleDouble[] constants(StraightLineProgram program, DfpField field) {
+        DoubleDouble[] values = new DoubleDouble[program.size()];
+        for (int i = 0; i < values.length; i++) {
+            if (program.instruction(i) instanceof Instruction.Constant constant) {
+                values[i] = DoubleDouble.of(number(field, constant.value()));
+            } else if (program.instruction(i) instanceof Instruction.Pi) {
+                values[i] = DoubleDouble.of(field.getPi());
+            }
+        }
+        return values;
+    }
+
+    private static DoubleDouble[] exact(
+            StraightLineProgram program, DfpField field, DoubleDouble[] constants, SamplePoints points, int k) {
+        DoubleDouble[] values = constants.clone();
         for (int i = 0; i < values.length; i++) {
             Instruction instruction = program.instruction(i);
+            if (values[i] != null) {
+                continue;
+            }
             if (instruction instanceof Instruction.Load load) {
-                values[i] = field.newDfp(points.value(load.symbol(), k));
-            } else if (instruction instanceof Instruction.Constant constant) {
-                values[i] = number(field, constant.value());
-            } else if (instruction instanceof Instruction.Pi) {
-                values[i] = field.getPi();
+                values[i] = DoubleDouble.of(points.value(load.symbol(), k));
             } else if (instruction instanceof Instruction.Negation negation) {
                 values[i] = values[negation.operand()].negate();
             } else if (instruction instanceof Instruction.Arithmetic arithmetic) {
-                Dfp a = values[arithmetic.left()];
-                Dfp b = values[arithmetic.right()];
+                DoubleDouble a = values[arithmetic.left()];
+                DoubleDouble b = values[arithmetic.right()];
                 values[i] = switch (arithmetic.operator()) {
                     case ADD -> a.add(b);
-                    case SUBTRACT -> a.subtract(b);
+                    case SUBTRACT -> a.add(b.negate());
                     case MULTIPLY -> a.multiply(b);
                     case DIVIDE -> a.divide(b);
                 };
             } else {
-                Instruction.Call call = (Instruction.Call) instruction;
-                Dfp x = values[call.operands().get(0)];
-                Dfp y = call.operands().size() > 1 ? values[call.operands().get(1)] : null;
-                values[i] = call(call.function(), x, y);
+                values[i] = call((Instruction.Call) instruction, values, field);
             }
         }
         return values;
@@ -89,9 +133,23 @@ final class ExactOutputs {
                 .divide(field.newDfp(value.getDenominator().toString()));
     }
 
+    private static DoubleDouble call(Instruction.Call call, DoubleDouble[] values, DfpField field) {
+        DoubleDouble x = values[call.operands().get(0)];
+        return switch (call.function()) {
+            case SQRT -> x.sqrt();
+            case ABS -> x.abs();
+            case SIGNUM -> DoubleDouble.of(Math.signum(x.high()));
+            default -> {
+                Dfp y = call.operands().size() > 1
+                        ? values[call.operands().get(1)].toDfp(field)
+                        : null;
+                yield DoubleDouble.of(call(call.function(), x.toDfp(field), y));
+            }
+        };
+    }
+
     private static Dfp call(RealFunction function, Dfp x, Dfp y) {
         return switch (function) {
-            case SQRT -> x.sqrt();
             case CBRT -> x.cbrt();
             case SIN -> x.sin();
             case COS -> x.cos();
@@ -109,8 +167,7 @@ final class ExactOutputs {
             case EXP -> x.exp();
             case LOG -> x.log();
             case POW -> x.log().multiply(y).exp();
-            case ABS -> x.abs();
-            case SIGNUM -> x.sign();
+            case SQRT, ABS, SIGNUM -> throw new IllegalArgumentException(function + " needs no decimal arithmetic");
         };
     }
 

@@ -1,72 +1,100 @@
 package io.github.gammawright.optimiser;
 
 import io.github.gammawright.graph.Instruction;
-import io.github.gammawright.graph.ProgramInterpreter;
 import io.github.gammawright.graph.RealFunctions;
-import io.github.gammawright.graph.SamplePoints;
 import io.github.gammawright.graph.StraightLineProgram;
 import java.util.Arrays;
 import java.util.function.IntPredicate;
+import java.util.stream.IntStream;
 
 /**
- * Measures how far the outputs of a network are from the truth at sample points of the domain, in multiples of the
- * conditioning limit, so that rewritings that cancel digits are turned down.
+ * Measures how far the outputs of a network are from the truth at some points of the domain, in multiples of the
+ * conditioning limit, and weighs that against what a rewriting saves: it is accepted or turned down as in simulated
+ * annealing (Metropolis, Rosenbluth, Rosenbluth, Teller &amp; Teller 1953), so that digits once lost can come back.
  */
 final class NumericGuard {
 
-    /** How far above its least error a network beyond the tolerance may go, so that rounding does not stop it. */
-    private static final double SLACK = 1.2;
+    /** What an error e times the tolerance at a point costs, in units of the cost model. */
+    static final double WEIGHT = 3;
+
+    private static final double WORST = 1e15;
 
     private final StraightLineProgram program;
-    private final SamplePoints points;
-    private final ExactOutputs exact;
+    private final int[] points;
     private final double[][] sourceValues;
     private final double tolerance;
-    private double reached;
-    private double least;
+    private final int[] distinct;
+    private final double[][] high;
+    private final double[][] low;
+    private final double[][] limit;
+    private final double[] penalties;
     private double[][] known = new double[0][];
 
     /**
-     * A guard over the outputs of a program.
+     * A guard over the outputs of a network just made from a program.
      *
      * @param exact what its outputs are, which every program for these outputs shares
-     * @param tolerance the multiple of the limit that every output may reach; a program that is worse to begin with
-     *     must not become worse still
+     * @param points the numbers of the points where errors are measured
+     * @param tolerance the multiple of the limit up to which an error costs nothing
      */
-    NumericGuard(StraightLineProgram program, ExactOutputs exact, SamplePoints points, double tolerance) {
-        this.program = program;
+    NumericGuard(Network network, ExactOutputs exact, int[] points, double tolerance) {
+        this.program = network.program;
         this.points = points;
-        this.exact = exact;
-        this.sourceValues = new double[points.count()][];
+        this.sourceValues = new double[points.length][];
         this.tolerance = tolerance;
-        this.reached = 0;
-        for (int k = 0; k < points.count(); k++) {
-            int point = k;
-            sourceValues[k] = ProgramInterpreter.run(program, symbol -> points.value(symbol, point));
-            for (int o = 0; o < program.outputs().size(); o++) {
-                reached = Math.max(
-                        reached, error(o, k, sourceValues[k][program.outputs().get(o)]));
+        this.distinct = distinct(network);
+        this.high = new double[distinct.length][points.length];
+        this.low = new double[distinct.length][points.length];
+        this.limit = new double[distinct.length][points.length];
+        this.penalties = new double[distinct.length];
+        for (int k = 0; k < points.length; k++) {
+            sourceValues[k] = exact.run(program, points[k]);
+            for (int i = 0; i < distinct.length; i++) {
+                DoubleDouble value = exact.value[distinct[i]][points[k]];
+                high[i][k] = value.high();
+                low[i][k] = value.low();
+                limit[i][k] = exact.limit[distinct[i]][points[k]];
             }
         }
-        this.least = reached;
+        for (int i = 0; i < distinct.length; i++) {
+            double[] values = new double[points.length];
+            for (int k = 0; k < points.length; k++) {
+                values[k] = sourceValues[k][program.outputs().get(distinct[i])];
+            }
+            penalties[i] = penalty(i, values, false);
+        }
+    }
+
+    /** The outputs without those that are the same value as an earlier one. */
+    private static int[] distinct(Network network) {
+        return IntStream.range(0, network.outputs.length)
+                .filter(o -> IntStream.range(0, o).noneMatch(p -> network.outputs[p] == network.outputs[o]))
+                .toArray();
     }
 
     /**
-     * Whether the outputs stay within the tolerance, or at least come no further from it than they were.
+     * Whether a rewriting is worth its errors.
      *
      * @param touched whether a value is computed otherwise than at the last call that accepted
+     * @param allowed by how much the errors may cost more than at the last call that accepted
      */
-    boolean accepts(Network network, IntPredicate touched) {
+    boolean accepts(Network network, IntPredicate touched, double allowed) {
         if (known.length < network.size) {
             known = Arrays.copyOf(known, 2 * network.size);
         }
         double[][] fresh = new double[network.size][];
-        double worst = worst(network, touched, fresh);
-        if (worst > tolerance && worst > SLACK * least) {
+        double[] changed = new double[distinct.length];
+        double more = 0;
+        for (int i = 0; i < distinct.length; i++) {
+            int v = network.outputs[distinct[i]];
+            double[] values = value(network, v, touched, fresh);
+            changed[i] = fresh[v] == null ? penalties[i] : penalty(i, values, network.outputMinus[distinct[i]]);
+            more += changed[i] - penalties[i];
+        }
+        if (!(more <= allowed)) {
             return false;
         }
-        reached = worst;
-        least = Math.min(least, worst);
+        System.arraycopy(changed, 0, penalties, 0, changed.length);
         for (int v = 0; v < fresh.length; v++) {
             if (fresh[v] != null) {
                 known[v] = fresh[v];
@@ -75,31 +103,18 @@ final class NumericGuard {
         return true;
     }
 
-    /** The error of the worst output of the network that was accepted last, in multiples of the limit. */
-    double reached() {
-        return reached;
+    /** What an error in multiples of the limit costs beyond the tolerance. */
+    static double penalty(double error, double tolerance) {
+        return error <= tolerance ? 0 : WEIGHT * StrictMath.log(Math.min(error / tolerance, WORST));
     }
 
-    private double worst(Network network, IntPredicate touched, double[][] fresh) {
-        double worst = 0;
-        for (int o = 0; o < network.outputs.length; o++) {
-            double[] value = value(network, network.outputs[o], touched, fresh);
-            for (int k = 0; k < points.count(); k++) {
-                worst = Math.max(worst, error(o, k, network.outputMinus[o] ? -value[k] : value[k]));
-            }
+    private double penalty(int output, double[] values, boolean minus) {
+        double total = 0;
+        for (int k = 0; k < points.length; k++) {
+            double actual = minus ? -values[k] : values[k];
+            total += penalty(ExactOutputs.error(actual, high[output][k], low[output][k], limit[output][k]), tolerance);
         }
-        return worst;
-    }
-
-    private double error(int output, int point, double value) {
-        if (!Double.isFinite(exact.limit[output][point]) || !Double.isFinite(exact.high[output][point])) {
-            return 0;
-        }
-        double difference = Math.abs(value - exact.high[output][point] - exact.low[output][point]);
-        if (difference == 0) {
-            return 0;
-        }
-        return Double.isNaN(difference) ? Double.POSITIVE_INFINITY : difference / exact.limit[output][point];
+        return total;
     }
 
     private double[] value(Network network, int v, IntPredicate touched, double[][] fresh) {
@@ -109,7 +124,7 @@ final class NumericGuard {
         if (known[v] != null && !touched.test(v)) {
             return known[v];
         }
-        double[] value = new double[points.count()];
+        double[] value = new double[points.length];
         byte operation = network.operation[v];
         if (operation == Network.ATOM) {
             atom(network, v, value, touched, fresh);

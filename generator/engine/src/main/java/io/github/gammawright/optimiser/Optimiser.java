@@ -3,13 +3,20 @@ package io.github.gammawright.optimiser;
 import io.github.gammawright.graph.LoweredProgram;
 import io.github.gammawright.graph.SamplePoints;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 import java.util.SplittableRandom;
+import java.util.TreeSet;
+import java.util.stream.IntStream;
 
 /**
  * Rewires programs by {@link Resubstitution}: all starts a little, then the most promising ones further. The budget
- * counts looks at values, so that the outcome is the same on every machine.
+ * counts looks at values, so that the outcome is the same on every machine; the searches of one generation do not know
+ * of each other and run on all cores.
+ *
+ * <p>Errors are watched at a few points during a search and measured at all points after it. A point where a result
+ * turns out to be bad joins those that the later searches watch.
  */
 public final class Optimiser {
 
@@ -17,17 +24,26 @@ public final class Optimiser {
     private static final int FREE_VALUES = 60;
     private static final int MOST_MEMBERS = 500;
     private static final int LARGEST = 25_000;
-    private static final int MOST_STARTS = 3;
+    private static final int MOST_STARTS = 4;
+    private static final int WATCHED = 48;
+    private static final int MOST_WATCHED = 160;
+    private static final int LEARNT_FROM_A_RESULT = 3;
+    private static final int SURVIVORS = 4;
     private static final double MOST_DEARER = 1.3;
 
-    /** What a program may reach at the guard's points, so that it stays below 4 limits everywhere. */
-    private static final double TOLERANCE = 2.5;
+    /** What a program may reach at the points, so that it stays below 4 limits everywhere. */
+    private static final double TOLERANCE = 3.25;
+
+    /** What it costs not to stay within the tolerance everywhere. */
+    private static final double ANY_ERROR = 24;
 
     private final SamplePoints points;
     private final long budget;
     private final double tradeOff;
     private long spent;
+    public static volatile double lastError; // SCRATCH
     private ExactOutputs exact;
+    private final TreeSet<Integer> watched = new TreeSet<>();
 
     /**
      * An optimiser.
@@ -42,8 +58,8 @@ public final class Optimiser {
     /**
      * An optimiser that weighs cost against error.
      *
-     * @param tradeOff how many times the least error seen a cheaper program may have; below 2 it is the error alone that decides, else all within
-     *     2.5 limits count as equally good
+     * @param tradeOff how many times the least error seen a cheaper program may have; below 2 it is the error alone
+     *     that decides, else all within the tolerance count as equally good
      */
     public Optimiser(SamplePoints points, long budget, double tradeOff) {
         this.tradeOff = tradeOff;
@@ -51,17 +67,25 @@ public final class Optimiser {
         this.budget = budget;
     }
 
-    /** A state of the search. */
-    private record State(LoweredProgram program, int cost, double error, int start) {}
+    /** A state of the search, with the errors at all points, the worst of them, and what all of them cost. */
+    private record State(LoweredProgram program, int cost, double[] errors, double error, double penalty, int start) {
+
+        double energy() {
+            return cost + penalty;
+        }
+    }
 
     /**
-     * Orders states: those that keep their digits come before those that do not, and among either the cheap ones first.
-     * Where none stays within the tolerance, a multiple of the least error counts as kept, four times it by default.
+     * Orders states: by cost and by what errors beyond the tolerance cost, any at all some operations; or, where
+     * accuracy counts more, those first that are close to the least error.
      */
     private Comparator<State> order(List<State> states) {
+        Comparator<State> byEnergy = Comparator.comparingDouble(State::energy);
+        if (tradeOff >= 2) {
+            return byEnergy.thenComparingDouble(State::error);
+        }
         double least = states.stream().mapToDouble(State::error).min().orElse(0);
-        double kept = Math.max(tradeOff < 2 ? 0 : TOLERANCE, tradeOff * least);
-        return Comparator.comparing((State s) -> s.error() > kept)
+        return Comparator.comparing((State s) -> s.error() > tradeOff * least)
                 .thenComparingInt(State::cost)
                 .thenComparingDouble(State::error);
     }
@@ -71,7 +95,7 @@ public final class Optimiser {
      *
      * @param program the best program
      * @param start the number of the start that it came from
-     * @param error its worst error at the guard's points in multiples of the conditioning limit
+     * @param error its worst error at the points in multiples of the conditioning limit
      */
     public record Outcome(LoweredProgram program, int start, double error) {}
 
@@ -82,32 +106,61 @@ public final class Optimiser {
      */
     public Outcome optimise(List<LoweredProgram> starts) {
         exact = new ExactOutputs(starts.get(0).program(), points);
+        for (int k = 0; k < Math.min(WATCHED, exact.points()); k++) {
+            watched.add(k);
+        }
         List<State> states = new ArrayList<>();
         for (int i = 0; i < starts.size(); i++) {
-            Network network = new Network(starts.get(i));
-            NumericGuard guard = new NumericGuard(starts.get(i).program(), exact, points, TOLERANCE);
-            states.add(new State(starts.get(i), network.totalCost(), guard.reached(), i));
+            states.add(state(starts.get(i), new Network(starts.get(i)).totalCost(), i));
         }
+        if (Boolean.getBoolean("trace")) { // SCRATCH
+            for (State s : states) { // SCRATCH
+                System.out.println("start " + s.start() + " cost " + s.cost() + " ops " + s.program().program().count() + " err " + s.error() + " bad " + Arrays.stream(s.errors()).filter(e -> e > TOLERANCE).count() + " worst at " + IntStream.range(0, exact.points()).filter(k -> s.errors()[k] > TOLERANCE).boxed().sorted(Comparator.comparingDouble(k -> -s.errors()[k])).limit(8).map(k -> k + ":" + String.format("%.1f", s.errors()[k])).toList()); // SCRATCH
+            } // SCRATCH
+        } // SCRATCH
         List<State> seen = new ArrayList<>(states);
         List<State> current = promising(states);
         int width = Math.max(2, current.size());
-        for (int generation = 0; spent < budget; generation++) {
-            List<State> next = new ArrayList<>();
-            for (int i = 0; i < width && spent < budget; i++) {
-                State parent = current.get(i % current.size());
-                next.add(round(parent, 7919L * generation + i));
+        for (int generation = 0; spent < budget && !current.isEmpty(); generation++) {
+            List<State> parents = current;
+            long seed = 7919L * generation;
+            List<Round> rounds = IntStream.range(0, width)
+                    .parallel()
+                    .mapToObj(i -> round(parents.get(i % parents.size()), seed + i))
+                    .toList();
+            for (Round round : rounds) {
+                spent += round.looks();
+                seen.add(round.result());
+                if (Boolean.getBoolean("trace")) { State s = round.result(); System.out.println("gen " + generation + " start " + s.start() + " cost " + s.cost() + " ops " + s.program().program().count() + " err " + s.error() + " bad " + Arrays.stream(s.errors()).filter(e -> e > TOLERANCE).count()); } // SCRATCH
+                learn(round.result());
             }
-            if (next.isEmpty()) {
-                break;
-            }
-            seen.addAll(next);
             seen.sort(order(seen));
-            seen = new ArrayList<>(seen.subList(0, Math.min(seen.size(), 4)));
+            seen = new ArrayList<>(seen.subList(0, Math.min(seen.size(), SURVIVORS)));
             width = Math.max(2, (width + 1) / 2);
             current = seen;
         }
         State best = seen.stream().min(order(seen)).orElseThrow();
+        lastError = best.error(); // SCRATCH
         return new Outcome(best.program(), best.start(), best.error());
+    }
+
+    private State state(LoweredProgram program, int cost, int start) {
+        double[] errors = exact.errors(program.program());
+        double worst = Arrays.stream(errors).max().orElse(0);
+        double penalty = Arrays.stream(errors)
+                .map(error -> NumericGuard.penalty(error, TOLERANCE))
+                .sum();
+        return new State(program, cost, errors, worst, worst > TOLERANCE ? ANY_ERROR + penalty : 0, start);
+    }
+
+    /** Watches the points where a result is worst from now on. */
+    private void learn(State state) {
+        IntStream.range(0, exact.points())
+                .filter(k -> state.errors()[k] > TOLERANCE && !watched.contains(k))
+                .boxed()
+                .sorted(Comparator.comparingDouble(k -> -state.errors()[k]))
+                .limit(Math.max(0, Math.min(LEARNT_FROM_A_RESULT, MOST_WATCHED - watched.size())))
+                .forEach(watched::add);
     }
 
     /** The starts that are worth a try: no two alike, none much dearer than the best, few in all. */
@@ -122,7 +175,7 @@ public final class Optimiser {
                             .instructions()
                             .equals(state.program().program().instructions()));
             boolean dear = !promising.isEmpty()
-                    && state.cost() > MOST_DEARER * promising.get(0).cost();
+                    && state.energy() > MOST_DEARER * promising.get(0).energy();
             if (!known && !dear && promising.size() < MOST_STARTS) {
                 promising.add(state);
             }
@@ -130,19 +183,23 @@ public final class Optimiser {
         return promising;
     }
 
-    private State round(State parent, long seed) {
+    /** The result of a search and the looks that it took. */
+    private record Round(State result, long looks) {}
+
+    private Round round(State parent, long seed) {
         Network network = new Network(parent.program());
         if (network.size > LARGEST) {
-            spent = budget;
-            return parent;
+            return new Round(parent, budget);
         }
-        NumericGuard guard = new NumericGuard(parent.program().program(), exact, points, TOLERANCE);
+        int[] watching = watched.stream().mapToInt(Integer::intValue).toArray();
+        NumericGuard guard = new NumericGuard(network, exact, watching, TOLERANCE);
         ParameterClosure.extend(network, FREE_VALUES);
         SplittableRandom random = new SplittableRandom(seed);
         int[] window = Windows.choose(network, random, MOST_MEMBERS);
         Resubstitution search = new Resubstitution(network, guard, random.nextLong(), window, MOST_MEMBERS);
         search.run(STEPS_A_ROUND);
-        spent += (long) STEPS_A_ROUND * Math.max(1, window.length);
-        return new State(NetworkWriter.write(network), network.totalCost(), guard.reached(), parent.start());
+        LoweredProgram program = NetworkWriter.write(network);
+        return new Round(
+                state(program, network.totalCost(), parent.start()), (long) STEPS_A_ROUND * Math.max(1, window.length));
     }
 }

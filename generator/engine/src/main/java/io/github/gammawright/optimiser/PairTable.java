@@ -23,6 +23,11 @@ final class PairTable {
     private byte[] kinds;
     private int mask;
     private int count;
+
+    /** A bit for each hash of a key that is there, eight times as many as places: most questions end here, in the cache. */
+    private long[] filter;
+
+    private int filterShift;
     private int[] members = new int[64];
     private int memberCount;
 
@@ -38,6 +43,8 @@ final class PairTable {
         Arrays.fill(pairs, -1);
         mask = capacity - 1;
         count = 0;
+        filter = new long[capacity / 8];
+        filterShift = Long.numberOfLeadingZeros(8L * capacity) + 1;
     }
 
     /** Enters a value: from now on its combinations with all that were entered before are found. */
@@ -94,10 +101,16 @@ final class PairTable {
             }
             i = (i + 1) & mask;
         }
+        enter(key);
         keys[i] = key;
         pairs[i] = u << 15 | v;
         kinds[i] = (byte) kind;
         count++;
+    }
+
+    private void enter(long key) {
+        long bit = key * ValueTable.SPREAD >>> filterShift;
+        filter[(int) (bit >>> 6)] |= 1L << bit;
     }
 
     private void grow() {
@@ -111,6 +124,7 @@ final class PairTable {
                 while (pairs[i] >= 0) {
                     i = (i + 1) & mask;
                 }
+                enter(oldKeys[j]);
                 keys[i] = oldKeys[j];
                 pairs[i] = oldPairs[j];
                 kinds[i] = oldKinds[j];
@@ -121,7 +135,8 @@ final class PairTable {
 
     /** The first place where a key stands, or −1; see {@link #next}. */
     int first(long key) {
-        return find(key, ValueTable.slot(key, mask));
+        long bit = key * ValueTable.SPREAD >>> filterShift;
+        return (filter[(int) (bit >>> 6)] & 1L << bit) == 0 ? -1 : find(key, ValueTable.slot(key, mask));
     }
 
     /** The next place of the same key, or −1. */

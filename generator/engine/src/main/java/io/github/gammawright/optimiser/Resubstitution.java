@@ -214,7 +214,7 @@ final class Resubstitution {
             return false;
         }
         network.acquireOperands(t);
-        if (!guard.accepts(network, this::dependsOnTarget)) {
+        if (!guard.accepts(network, this::dependsOnTarget, temperature * -Math.log(random.nextDouble()))) {
             network.releaseOperands(t);
             network.operation[t] = oldOperation;
             network.left[t] = oldLeft;

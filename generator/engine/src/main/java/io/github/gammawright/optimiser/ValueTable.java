@@ -5,6 +5,9 @@ import java.util.Arrays;
 /** A hash table from non-negative residues to small numbers, open-addressed for speed. */
 final class ValueTable {
 
+    /** An odd number near 2⁶⁴ divided by the golden ratio: products with it differ in their leading bits. */
+    static final long SPREAD = 0x9E3779B97F4A7C15L;
+
     private long[] keys = new long[256];
     private int[] values = new int[256];
     private int count;
@@ -56,7 +59,7 @@ final class ValueTable {
     }
 
     static int slot(long key, int mask) {
-        long h = key * 0x9E3779B97F4A7C15L;
+        long h = key * SPREAD;
         return (int) (h >>> 32) & mask;
     }
 }

@@ -15,7 +15,7 @@ import java.util.stream.IntStream;
 final class NumericGuard {
 
     /** What an error e times the tolerance at a point costs, in units of the cost model. */
-    static final double WEIGHT = 3;
+    static final double WEIGHT = Double.parseDouble(System.getProperty("weight", "3"));
 
     private static final double WORST = 1e15;
 

@@ -27,6 +27,9 @@ final class PairTable {
     /** A bit for each hash of a key that is there, eight times as many as places: most questions end here, in the cache. */
     private long[] filter;
 
+    /** The same for hashes that were entered more than once. */
+    private long[] repeated;
+
     private int filterShift;
     private int[] members = new int[64];
     private int memberCount;
@@ -44,6 +47,7 @@ final class PairTable {
         mask = capacity - 1;
         count = 0;
         filter = new long[capacity / 8];
+        repeated = new long[capacity / 8];
         filterShift = Long.numberOfLeadingZeros(8L * capacity) + 1;
     }
 
@@ -110,7 +114,9 @@ final class PairTable {
 
     private void enter(long key) {
         long bit = key * ValueTable.SPREAD >>> filterShift;
-        filter[(int) (bit >>> 6)] |= 1L << bit;
+        int word = (int) (bit >>> 6);
+        repeated[word] |= filter[word] & 1L << bit;
+        filter[word] |= 1L << bit;
     }
 
     private void grow() {
@@ -133,10 +139,15 @@ final class PairTable {
         }
     }
 
-    /** The first place where a key stands, or −1; see {@link #next}. */
-    int first(long key) {
+    /**
+     * The first place where a key stands, or −1; see {@link #next}.
+     *
+     * @param several whether a key that stands in one place only counts as not there
+     */
+    int first(long key, boolean several) {
         long bit = key * ValueTable.SPREAD >>> filterShift;
-        return (filter[(int) (bit >>> 6)] & 1L << bit) == 0 ? -1 : find(key, ValueTable.slot(key, mask));
+        long word = (several ? repeated : filter)[(int) (bit >>> 6)];
+        return (word & 1L << bit) == 0 ? -1 : find(key, ValueTable.slot(key, mask));
     }
 
     /** The next place of the same key, or −1. */

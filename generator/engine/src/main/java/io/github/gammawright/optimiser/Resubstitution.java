@@ -105,9 +105,6 @@ final class Resubstitution {
         long residue = network.residues[0][t];
         for (int i = 0; i < pairs.members(); i++) {
             int w = pairs.member(i);
-            if (dependsOnTarget(w)) {
-                continue;
-            }
             long other = network.residues[0][w];
             long inverse = network.inverse[w];
             lookUp(t, freed, PairTable.DIFFERENCE, w, P.subtract(residue, other));
@@ -142,7 +139,7 @@ final class Resubstitution {
         int known = network.find(key);
         if (known >= 0) {
             boolean possible = kind != PairTable.INVERSE_QUOTIENT || network.divisor[known];
-            if (possible && known != t && !dependsOnTarget(known)) {
+            if (possible && known != t && !dependsOnTarget(known) && !dependsOnTarget(w)) {
                 consider(freed, outerCost, kind, w, NONE, known, NONE);
             }
             return;
@@ -150,12 +147,14 @@ final class Resubstitution {
         if (outerCost + Network.COST_ADD - freed > best + MOST_NOISE * temperature) {
             return;
         }
-        for (int place = pairs.first(key); place >= 0; place = pairs.next(key, place)) {
+        // t − w, t + w and t·w are in the table as what they are
+        boolean several = kind != PairTable.PRODUCT && kind != PairTable.INVERSE_QUOTIENT;
+        for (int place = pairs.first(key, several); place >= 0; place = pairs.next(key, place)) {
             int u = pairs.firstOf(place);
             int v = pairs.secondOf(place);
             boolean possible =
                     kind != PairTable.INVERSE_QUOTIENT || Divisors.isDivisor(network, pairs.kind(place), u, v);
-            if (possible && !dependsOnTarget(u) && !dependsOnTarget(v)) {
+            if (possible && !dependsOnTarget(u) && !dependsOnTarget(v) && !dependsOnTarget(w)) {
                 consider(freed, outerCost + costOf(pairs.kind(place)), kind, w, pairs.kind(place), u, v);
             }
         }

@@ -12,11 +12,20 @@ final class ValueTable {
     private int[] values = new int[256];
     private int count;
 
+    /** A bit for each hash of a key that is there, eight times as many as places. */
+    private long[] filter = new long[32];
+
+    private int filterShift = Long.SIZE - 11;
+
     ValueTable() {
         Arrays.fill(values, -1);
     }
 
     int find(long key) {
+        long bit = key * SPREAD >>> filterShift;
+        if ((filter[(int) (bit >>> 6)] & 1L << bit) == 0) {
+            return -1;
+        }
         int mask = keys.length - 1;
         for (int i = slot(key, mask); values[i] >= 0; i = (i + 1) & mask) {
             if (keys[i] == key) {
@@ -42,6 +51,8 @@ final class ValueTable {
         keys[i] = key;
         values[i] = value;
         count++;
+        long bit = key * SPREAD >>> filterShift;
+        filter[(int) (bit >>> 6)] |= 1L << bit;
     }
 
     private void grow() {
@@ -51,6 +62,8 @@ final class ValueTable {
         values = new int[keys.length];
         Arrays.fill(values, -1);
         count = 0;
+        filter = new long[keys.length / 8];
+        filterShift--;
         for (int i = 0; i < oldKeys.length; i++) {
             if (oldValues[i] >= 0) {
                 put(oldKeys[i], oldValues[i]);

@@ -7,7 +7,10 @@ import io.github.gammawright.geometry.DomainPoints;
 import io.github.gammawright.geometry.DomainProgram;
 import io.github.gammawright.geometry.FramePlan;
 import io.github.gammawright.geometry.MetricGraphBuilder;
+import io.github.gammawright.geometry.Quantity;
 import io.github.gammawright.geometry.Route;
+import io.github.gammawright.graph.LoweredProgram;
+import io.github.gammawright.graph.SamplePoints;
 import io.github.gammawright.graph.StraightLineProgram;
 import io.github.gammawright.optimiser.CostModel;
 import io.github.gammawright.optimiser.FusedOperations;
@@ -22,6 +25,9 @@ public final class KernelGenerator {
 
     private static final int GUARD_POINTS = 192;
 
+    /** What part of the budget goes into the Christoffel symbols before they are contracted. */
+    private static final double SHARE_OF_SYMBOLS = 0.5;
+
     /**
      * Makes a class.
      *
@@ -35,18 +41,16 @@ public final class KernelGenerator {
     private static GeneratedClass make(MetricDefinition definition, KernelSpecification specification) {
         Applicability.require(definition, specification.quantities());
         Optional<FramePlan> framePlan = Applicability.framePlan(definition, specification.quantities());
-        List<Candidate> candidates = new ArrayList<>();
-        for (Route route : Route.candidates(MetricGraphBuilder.build(definition), specification.quantities())) {
-            candidates.addAll(Candidate.of(definition, specification, route, framePlan, candidates.isEmpty()));
+        SamplePoints points = DomainPoints.guard(definition, GUARD_POINTS);
+        GenerationOptions options = specification.options();
+        List<Candidate> candidates = candidates(definition, specification, framePlan);
+        if (specification.quantities().equals(List.of(Quantity.GEODESIC_ACCELERATION))) {
+            candidates.add(contracted(definition, specification, candidates.get(0), points));
         }
-        Optimiser optimiser = new Optimiser(
-                DomainPoints.guard(definition, GUARD_POINTS),
-                budget(specification.options().effort()),
-                specification.options().prefer() == GenerationOptions.Preference.ACCURACY ? 1.25 : 4);
+        Optimiser optimiser = optimiser(points, options, 1);
         Optimiser.Outcome outcome =
                 optimiser.optimise(candidates.stream().map(Candidate::program).toList());
         Candidate origin = candidates.get(outcome.start());
-        GenerationOptions options = specification.options();
         boolean shared = options.trigonometry() == GenerationOptions.Trigonometry.SHARED;
         StraightLineProgram program = outcome.program().program();
         List<CostReport.Stage> stages = new ArrayList<>();
@@ -54,7 +58,7 @@ public final class KernelGenerator {
                 stage("graph (" + origin.description() + ")", origin.program().program()));
         stages.add(stage("resubstitution", program));
         if (options.fma()) {
-            program = FusedOperations.of(program, DomainPoints.guard(definition, GUARD_POINTS));
+            program = FusedOperations.of(program, points);
             stages.add(stage("fused operations", program));
         }
         program = Schedule.of(program);
@@ -77,11 +81,47 @@ public final class KernelGenerator {
         return new CostReport.Stage(name, program.count(), additions);
     }
 
+    private static List<Candidate> candidates(
+            MetricDefinition definition, KernelSpecification specification, Optional<FramePlan> framePlan) {
+        List<Candidate> candidates = new ArrayList<>();
+        for (Route route : Route.candidates(MetricGraphBuilder.build(definition), specification.quantities())) {
+            candidates.addAll(Candidate.of(definition, specification, route, framePlan, candidates.isEmpty()));
+        }
+        return candidates;
+    }
+
+    /** The acceleration from Christoffel symbols on which a part of the budget was spent first. */
+    private static Candidate contracted(
+            MetricDefinition definition, KernelSpecification specification, Candidate model, SamplePoints points) {
+        KernelSpecification ofSymbols = new KernelSpecification(
+                specification.packageName(),
+                specification.className(),
+                List.of(Quantity.CHRISTOFFEL),
+                specification.layout(),
+                specification.options());
+        List<Candidate> symbols = candidates(definition, ofSymbols, Optional.empty());
+        Optimiser.Outcome outcome = optimiser(points, specification.options(), SHARE_OF_SYMBOLS)
+                .optimise(symbols.stream().map(Candidate::program).toList());
+        LoweredProgram program = ContractedSymbols.of(
+                outcome.program(),
+                symbols.get(outcome.start()).zero().get(0),
+                model.program(),
+                definition.coordinates().size());
+        return new Candidate("optimised Christoffel symbols, contracted", model.zero(), program);
+    }
+
+    private static Optimiser optimiser(SamplePoints points, GenerationOptions options, double share) {
+        return new Optimiser(
+                points,
+                Math.round(share * budget(options.effort())),
+                options.prefer() == GenerationOptions.Preference.ACCURACY ? 1.25 : 4);
+    }
+
     private static long budget(GenerationOptions.Effort effort) {
         return switch (effort) {
-            case QUICK -> 1_000_000;
-            case NORMAL -> 5_000_000;
-            case THOROUGH -> 100_000_000;
+            case QUICK -> 3_000_000;
+            case NORMAL -> 30_000_000;
+            case THOROUGH -> 300_000_000;
         };
     }
 }

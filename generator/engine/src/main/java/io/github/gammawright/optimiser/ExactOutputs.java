@@ -6,7 +6,10 @@ import io.github.gammawright.graph.RealFunction;
 import io.github.gammawright.graph.SamplePoints;
 import io.github.gammawright.graph.StraightLineProgram;
 import io.github.gammawright.graph.Symbol;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
+import java.util.stream.IntStream;
 import org.hipparchus.analysis.differentiation.Gradient;
 import org.hipparchus.dfp.Dfp;
 import org.hipparchus.dfp.DfpField;
@@ -27,6 +30,7 @@ final class ExactOutputs {
     final double[][] limit;
 
     private final SamplePoints points;
+    private final Map<Symbol, double[]> inputs = new HashMap<>();
 
     ExactOutputs(StraightLineProgram program, SamplePoints points) {
         this.points = points;
@@ -57,9 +61,16 @@ final class ExactOutputs {
         return points.count();
     }
 
+    /** The values of a symbol at all points; searches that run at the same time ask for them. */
+    private synchronized double[] input(Symbol symbol) {
+        return inputs.computeIfAbsent(symbol, s -> IntStream.range(0, points.count())
+                .mapToDouble(point -> points.value(s, point))
+                .toArray());
+    }
+
     /** The values of a program for these outputs at a point, in double arithmetic. */
     double[] run(StraightLineProgram program, int point) {
-        return ProgramInterpreter.run(program, symbol -> points.value(symbol, point));
+        return ProgramInterpreter.run(program, symbol -> input(symbol)[point]);
     }
 
     /** The worst errors of a program for these outputs, for each point in multiples of the limit. */

@@ -14,15 +14,13 @@ import java.util.stream.IntStream;
  */
 final class NumericGuard {
 
-    /** What an error e times the tolerance at a point costs, in units of the cost model. */
-    static final double WEIGHT = Double.parseDouble(System.getProperty("weight", "3"));
-
     private static final double WORST = 1e15;
 
     private final StraightLineProgram program;
     private final int[] points;
     private final double[][] sourceValues;
     private final double tolerance;
+    private final double weight;
     private final int[] distinct;
     private final double[][] high;
     private final double[][] low;
@@ -36,12 +34,14 @@ final class NumericGuard {
      * @param exact what its outputs are, which every program for these outputs shares
      * @param points the numbers of the points where errors are measured
      * @param tolerance the multiple of the limit up to which an error costs nothing
+     * @param weight what an error e times the tolerance costs at each point, in units of the cost model
      */
-    NumericGuard(Network network, ExactOutputs exact, int[] points, double tolerance) {
+    NumericGuard(Network network, ExactOutputs exact, int[] points, double tolerance, double weight) {
         this.program = network.program;
         this.points = points;
         this.sourceValues = new double[points.length][];
         this.tolerance = tolerance;
+        this.weight = weight;
         this.distinct = distinct(network);
         this.high = new double[distinct.length][points.length];
         this.low = new double[distinct.length][points.length];
@@ -103,18 +103,18 @@ final class NumericGuard {
         return true;
     }
 
-    /** What an error in multiples of the limit costs beyond the tolerance. */
-    static double penalty(double error, double tolerance) {
-        return error <= tolerance ? 0 : WEIGHT * StrictMath.log(Math.min(error / tolerance, WORST));
+    /** How far an error in multiples of the limit is beyond the tolerance, as a natural logarithm. */
+    static double excess(double error, double tolerance) {
+        return error <= tolerance ? 0 : StrictMath.log(Math.min(error / tolerance, WORST));
     }
 
     private double penalty(int output, double[] values, boolean minus) {
         double total = 0;
         for (int k = 0; k < points.length; k++) {
             double actual = minus ? -values[k] : values[k];
-            total += penalty(ExactOutputs.error(actual, high[output][k], low[output][k], limit[output][k]), tolerance);
+            total += excess(ExactOutputs.error(actual, high[output][k], low[output][k], limit[output][k]), tolerance);
         }
-        return total;
+        return weight * total;
     }
 
     private double[] value(Network network, int v, IntPredicate touched, double[][] fresh) {

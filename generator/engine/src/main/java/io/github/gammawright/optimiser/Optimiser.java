@@ -29,10 +29,24 @@ public final class Optimiser {
     private static final int MOST_WATCHED = 160;
     private static final int LEARNT_FROM_A_RESULT = 3;
     private static final int SURVIVORS = 4;
+
+    /** Searches that run side by side. */
+    private static final int LANES = 2;
+
+    /** The part of the budget in which lineages begin at the starts again and again; the rest goes on with the best. */
+    private static final double EXPLORATION = 0.7;
+
+    private static final int SHORTEST_LINEAGE = 3;
+    private static final int LINEAGES = 5;
     private static final double MOST_DEARER = 1.3;
 
     /** What a program may reach at the points, so that it stays below 4 limits everywhere. */
     private static final double TOLERANCE = 3.25;
+
+    /** What an error e times the tolerance costs at each point at first and in the end. */
+    private static final double LIGHTEST = 3;
+
+    private static final double HEAVIEST = 8;
 
     /** What it costs not to stay within the tolerance everywhere. */
     private static final double ANY_ERROR = 24;
@@ -41,7 +55,6 @@ public final class Optimiser {
     private final long budget;
     private final double tradeOff;
     private long spent;
-    public static volatile double lastError; // SCRATCH
     private ExactOutputs exact;
     private final TreeSet<Integer> watched = new TreeSet<>();
 
@@ -113,44 +126,59 @@ public final class Optimiser {
         for (int i = 0; i < starts.size(); i++) {
             states.add(state(starts.get(i), new Network(starts.get(i)).totalCost(), i));
         }
-        if (Boolean.getBoolean("trace")) { // SCRATCH
-            for (State s : states) { // SCRATCH
-                System.out.println("start " + s.start() + " cost " + s.cost() + " ops " + s.program().program().count() + " err " + s.error() + " bad " + Arrays.stream(s.errors()).filter(e -> e > TOLERANCE).count() + " worst at " + IntStream.range(0, exact.points()).filter(k -> s.errors()[k] > TOLERANCE).boxed().sorted(Comparator.comparingDouble(k -> -s.errors()[k])).limit(8).map(k -> k + ":" + String.format("%.1f", s.errors()[k])).toList()); // SCRATCH
-            } // SCRATCH
-        } // SCRATCH
         List<State> seen = new ArrayList<>(states);
-        List<State> current = promising(states);
-        int width = Math.max(2, current.size());
-        for (int generation = 0; spent < budget && !current.isEmpty(); generation++) {
+        List<State> promising = promising(states);
+        List<State> current = new ArrayList<>();
+        int lineages = 0;
+        int generation = 0;
+        for (int lineage = 0; spent < budget && !promising.isEmpty(); generation++, lineage++) {
+            boolean last = spent > EXPLORATION * budget;
+            if (last) {
+                current = new ArrayList<>(seen.subList(0, Math.min(LANES, seen.size())));
+            } else if (current.isEmpty() || lineage >= lineageLength(generation)) {
+                current.clear();
+                for (int lane = 0; lane < LANES; lane++) {
+                    current.add(promising.get(lineages++ % promising.size()));
+                }
+                lineage = 0;
+            }
             List<State> parents = current;
             long seed = 7919L * generation;
-            List<Round> rounds = IntStream.range(0, width)
+            double weight = LIGHTEST + (HEAVIEST - LIGHTEST) * spent / budget;
+            List<Round> rounds = IntStream.range(0, LANES)
                     .parallel()
-                    .mapToObj(i -> round(parents.get(i % parents.size()), seed + i))
+                    .mapToObj(i -> round(parents.get(i % parents.size()), seed + i, weight))
                     .toList();
-            for (Round round : rounds) {
+            List<State> next = new ArrayList<>();
+            for (int lane = 0; lane < LANES; lane++) {
+                Round round = rounds.get(lane);
                 spent += round.looks();
+                State parent = parents.get(lane % parents.size());
+                next.add(round.result().energy() <= parent.energy() ? round.result() : parent);
                 seen.add(round.result());
-                if (Boolean.getBoolean("trace")) { State s = round.result(); System.out.println("gen " + generation + " start " + s.start() + " cost " + s.cost() + " ops " + s.program().program().count() + " err " + s.error() + " bad " + Arrays.stream(s.errors()).filter(e -> e > TOLERANCE).count()); } // SCRATCH
                 learn(round.result());
             }
+            current = next;
             seen.sort(order(seen));
             seen = new ArrayList<>(seen.subList(0, Math.min(seen.size(), SURVIVORS)));
-            width = Math.max(2, (width + 1) / 2);
-            current = seen;
         }
         State best = seen.stream().min(order(seen)).orElseThrow();
-        lastError = best.error(); // SCRATCH
         return new Outcome(best.program(), best.start(), best.error());
+    }
+
+    /** How many generations a lineage lasts, by what the generations so far have cost. */
+    private int lineageLength(int generations) {
+        long all = budget * generations / Math.max(1, spent);
+        return (int) Math.max(SHORTEST_LINEAGE, all / LINEAGES);
     }
 
     private State state(LoweredProgram program, int cost, int start) {
         double[] errors = exact.errors(program.program());
         double worst = Arrays.stream(errors).max().orElse(0);
-        double penalty = Arrays.stream(errors)
-                .map(error -> NumericGuard.penalty(error, TOLERANCE))
+        double excess = Arrays.stream(errors)
+                .map(error -> NumericGuard.excess(error, TOLERANCE))
                 .sum();
-        return new State(program, cost, errors, worst, worst > TOLERANCE ? ANY_ERROR + penalty : 0, start);
+        return new State(program, cost, errors, worst, excess > 0 ? ANY_ERROR + HEAVIEST * excess : 0, start);
     }
 
     /** Watches the points where a result is worst from now on. */
@@ -186,13 +214,13 @@ public final class Optimiser {
     /** The result of a search and the looks that it took. */
     private record Round(State result, long looks) {}
 
-    private Round round(State parent, long seed) {
+    private Round round(State parent, long seed, double weight) {
         Network network = new Network(parent.program());
         if (network.size > LARGEST) {
             return new Round(parent, budget);
         }
         int[] watching = watched.stream().mapToInt(Integer::intValue).toArray();
-        NumericGuard guard = new NumericGuard(network, exact, watching, TOLERANCE);
+        NumericGuard guard = new NumericGuard(network, exact, watching, TOLERANCE, weight);
         ParameterClosure.extend(network, FREE_VALUES);
         SplittableRandom random = new SplittableRandom(seed);
         int[] window = Windows.choose(network, random, MOST_MEMBERS);

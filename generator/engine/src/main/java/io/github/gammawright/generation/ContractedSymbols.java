@@ -104,7 +104,8 @@ final class ContractedSymbols {
         }
         if (instruction instanceof Instruction.Call call) {
             return new Instruction.Call(
-                    call.function(), call.operands().stream().map(i -> number[i]).toList());
+                    call.function(),
+                    call.operands().stream().map(i -> number[i]).toList());
         }
         return instruction;
     }

@@ -32,7 +32,6 @@ public final class DomainPoints implements SamplePoints {
     /** Powers of ten between the closest points to an edge and the farthest that count as close. */
     private static final double CLOSEST = 7.5;
 
-
     private final List<Map<Symbol, Double>> points;
     private final SamplePoints others;
 

@@ -63,9 +63,11 @@ final class ExactOutputs {
 
     /** The values of a symbol at all points; searches that run at the same time ask for them. */
     private synchronized double[] input(Symbol symbol) {
-        return inputs.computeIfAbsent(symbol, s -> IntStream.range(0, points.count())
-                .mapToDouble(point -> points.value(s, point))
-                .toArray());
+        return inputs.computeIfAbsent(
+                symbol,
+                s -> IntStream.range(0, points.count())
+                        .mapToDouble(point -> points.value(s, point))
+                        .toArray());
     }
 
     /** The values of a program for these outputs at a point, in double arithmetic. */
@@ -80,8 +82,7 @@ final class ExactOutputs {
             double[] values = run(program, k);
             for (int o = 0; o < value.length; o++) {
                 double actual = values[program.outputs().get(o)];
-                errors[k] = Math.max(
-                        errors[k], error(actual, value[o][k].high(), value[o][k].low(), limit[o][k]));
+                errors[k] = Math.max(errors[k], error(actual, value[o][k].high(), value[o][k].low(), limit[o][k]));
             }
         }
         return errors;
@@ -151,9 +152,7 @@ final class ExactOutputs {
             case ABS -> x.abs();
             case SIGNUM -> DoubleDouble.of(Math.signum(x.high()));
             default -> {
-                Dfp y = call.operands().size() > 1
-                        ? values[call.operands().get(1)].toDfp(field)
-                        : null;
+                Dfp y = call.operands().size() > 1 ? values[call.operands().get(1)].toDfp(field) : null;
                 yield DoubleDouble.of(call(call.function(), x.toDfp(field), y));
             }
         };

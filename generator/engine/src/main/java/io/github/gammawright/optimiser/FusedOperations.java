@@ -2,10 +2,10 @@ package io.github.gammawright.optimiser;
 
 import io.github.gammawright.graph.Instruction;
 import io.github.gammawright.graph.Instruction.Operator;
-import io.github.gammawright.graph.ProgramInterpreter;
 import io.github.gammawright.graph.SamplePoints;
 import io.github.gammawright.graph.StraightLineProgram;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.BitSet;
 import java.util.HashMap;
 import java.util.List;
@@ -18,17 +18,15 @@ import java.util.Map;
 public final class FusedOperations {
 
     /** What outputs may reach in multiples of the conditioning limit, wherever they were before. */
-    private static final double TOLERANCE = 2.5;
+    private static final double TOLERANCE = 3.25;
 
     private final StraightLineProgram program;
-    private final SamplePoints points;
     private final ExactOutputs exact;
     private final double allowed;
     private final BitSet accepted = new BitSet();
 
     private FusedOperations(StraightLineProgram program, SamplePoints points) {
         this.program = program;
-        this.points = points;
         this.exact = new ExactOutputs(program, points);
         this.allowed = Math.max(TOLERANCE, worst(program));
     }
@@ -102,19 +100,7 @@ public final class FusedOperations {
     }
 
     private double worst(StraightLineProgram trial) {
-        double worst = 0;
-        for (int k = 0; k < points.count(); k++) {
-            int point = k;
-            double[] values = ProgramInterpreter.run(trial, symbol -> points.value(symbol, point));
-            for (int o = 0; o < trial.outputs().size(); o++) {
-                double limit = exact.limit[o][k];
-                double error = Math.abs(values[trial.outputs().get(o)] - exact.high[o][k] - exact.low[o][k]);
-                if (error != 0 && Double.isFinite(limit) && Double.isFinite(exact.high[o][k])) {
-                    worst = Math.max(worst, Double.isNaN(error) ? Double.POSITIVE_INFINITY : error / limit);
-                }
-            }
-        }
-        return worst;
+        return Arrays.stream(exact.errors(trial)).max().orElse(0);
     }
 
     private static StraightLineProgram contracted(StraightLineProgram program, BitSet sums) {

@@ -113,9 +113,9 @@ final class PairTable {
     }
 
     private void enter(long key) {
-        long bit = key * ValueTable.SPREAD >>> filterShift;
+        long bit = (key * ValueTable.SPREAD) >>> filterShift;
         int word = (int) (bit >>> 6);
-        repeated[word] |= filter[word] & 1L << bit;
+        repeated[word] |= filter[word] & (1L << bit);
         filter[word] |= 1L << bit;
     }
 
@@ -145,9 +145,9 @@ final class PairTable {
      * @param several whether a key that stands in one place only counts as not there
      */
     int first(long key, boolean several) {
-        long bit = key * ValueTable.SPREAD >>> filterShift;
+        long bit = (key * ValueTable.SPREAD) >>> filterShift;
         long word = (several ? repeated : filter)[(int) (bit >>> 6)];
-        return (word & 1L << bit) == 0 ? -1 : find(key, ValueTable.slot(key, mask));
+        return (word & (1L << bit)) == 0 ? -1 : find(key, ValueTable.slot(key, mask));
     }
 
     /** The next place of the same key, or −1. */

@@ -22,8 +22,8 @@ final class ValueTable {
     }
 
     int find(long key) {
-        long bit = key * SPREAD >>> filterShift;
-        if ((filter[(int) (bit >>> 6)] & 1L << bit) == 0) {
+        long bit = (key * SPREAD) >>> filterShift;
+        if ((filter[(int) (bit >>> 6)] & (1L << bit)) == 0) {
             return -1;
         }
         int mask = keys.length - 1;
@@ -51,7 +51,7 @@ final class ValueTable {
         keys[i] = key;
         values[i] = value;
         count++;
-        long bit = key * SPREAD >>> filterShift;
+        long bit = (key * SPREAD) >>> filterShift;
         filter[(int) (bit >>> 6)] |= 1L << bit;
     }
 

@@ -24,7 +24,10 @@ final class Declarations {
     Optional<String> declare(String written, NameKind kind, SourcePosition position) {
         String name = Names.normalised(written);
         if (!Names.isName(name)) {
-            diagnostics.report(DiagnosticCode.NAME_INVALID, position, written, Names.LONGEST);
+            String remedy = DefinitionKeys.TOP_LEVEL.contains(written)
+                    ? "'" + written + "' belongs before the first table."
+                    : DiagnosticCode.NAME_INVALID.remedy(written, Names.LONGEST);
+            diagnostics.reportWithRemedy(DiagnosticCode.NAME_INVALID, position, remedy, written);
             return Optional.empty();
         }
         if (Names.isReserved(name)) {

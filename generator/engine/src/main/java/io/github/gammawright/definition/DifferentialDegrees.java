@@ -115,7 +115,7 @@ final class DifferentialDegrees {
         }
         Optional<Integer> exponent = wholeExponent(binary);
         if (exponent.isEmpty()) {
-            refuse(binary.left(), "the base of a power that is no whole number");
+            refuse(binary.left(), "the base of a power whose exponent is no whole number");
             return DEGREE_0;
         }
         int power = DEGREE_0;

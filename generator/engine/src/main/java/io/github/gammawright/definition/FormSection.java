@@ -81,9 +81,10 @@ final class FormSection {
         if (coordinates.size() < 2) {
             reading.diagnostics()
                     .report(
-                            DiagnosticCode.COORDINATES_WRONG,
+                            DiagnosticCode.LENGTH_WRONG,
                             form.position(),
-                            "in three-plus-one form 2 or more",
+                            DefinitionKeys.COORDINATES,
+                            "two entries or more for this form",
                             coordinates.size());
             return Optional.empty();
         }

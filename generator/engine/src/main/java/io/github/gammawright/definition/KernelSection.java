@@ -51,13 +51,13 @@ final class KernelSection {
             String name = text.toString();
             if (!ClassNames.isClassName(name)) {
                 reading.diagnostics()
-                        .report(
+                        .reportWithRemedy(
                                 DiagnosticCode.JAVA_NAME_INVALID,
                                 text.position(0, text.length()),
-                                name,
-                                "class",
                                 "Use letters and digits, such as LanternStarOrbit, and no word or basic class of the"
-                                        + " language.");
+                                        + " language.",
+                                name,
+                                "class");
             }
             return name;
         });
@@ -68,12 +68,12 @@ final class KernelSection {
             String name = text.toString();
             if (!ClassNames.isPackageName(name)) {
                 reading.diagnostics()
-                        .report(
+                        .reportWithRemedy(
                                 DiagnosticCode.JAVA_NAME_INVALID,
                                 text.position(0, text.length()),
+                                "Use words joined by '.', such as com.example.kernels.",
                                 name,
-                                "package",
-                                "Use words joined by '.', such as com.example.kernels.");
+                                "package");
             }
             return name;
         });

@@ -132,7 +132,7 @@ final class PreciseEvaluator {
         }
         boolean below = y.lessThan(y.getZero());
         if (x.isZero()) {
-            return below ? pi.divide(-2) : pi.divide(2);
+            return below ? pi.divide(2).negate() : pi.divide(2);
         }
         Dfp angle = y.divide(x).atan();
         if (x.greaterThan(x.getZero())) {

@@ -115,7 +115,7 @@ final class Reading {
         diagnostics.report(
                 DiagnosticCode.PARAMETER_NOT_FINITE,
                 Expressions.start(constant),
-                Double.isNaN(value) ? "not a real number" : "beyond the range of double");
+                Double.isNaN(value) ? "no real number" : "too large for a double");
         return Optional.empty();
     }
 

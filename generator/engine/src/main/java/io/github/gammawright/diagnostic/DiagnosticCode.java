@@ -127,7 +127,7 @@ public enum DiagnosticCode {
             Subject.TEXT,
             "with the abbreviations it uses put in, '{0}' is nested more than {1} deep",
             "Shorten the chain of abbreviations."),
-    PARAMETER_NOT_FINITE(Subject.TEXT, "the value is {0}, not a finite real number", ""),
+    PARAMETER_NOT_FINITE(Subject.TEXT, "the value is {0}, where a finite one is needed", ""),
     FORM_MISSING(
             Subject.TEXT,
             "the metric itself is missing",

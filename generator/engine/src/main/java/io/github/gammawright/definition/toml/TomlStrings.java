@@ -38,6 +38,9 @@ final class TomlStrings {
             int c = index.at(offset);
             if (basic && c == '\\') {
                 escape();
+            } else if (multiLine && c == '\r' && index.at(offset + 1) == '\n') {
+                // A line break is one character, as the library reads it.
+                offset++;
             } else {
                 append(c, offset);
                 offset++;

@@ -28,8 +28,8 @@ final class ContractedSymbols {
     /**
      * The program for {@link Quantity#GEODESIC_ACCELERATION}.
      *
-     * @param symbols a program for {@link Quantity#CHRISTOFFEL}
-     * @param zero which of its outputs vanish identically
+     * @param symbols a program for {@link Quantity#CHRISTOFFEL} in the full layout
+     * @param zero which of its outputs, all n³ in index order, vanish identically
      * @param model another program for the acceleration, from which the velocities are taken
      */
     static LoweredProgram of(LoweredProgram symbols, List<Boolean> zero, LoweredProgram model, int n) {

@@ -6,6 +6,7 @@ import io.github.gammawright.emission.KernelModel;
 import io.github.gammawright.geometry.DomainPoints;
 import io.github.gammawright.geometry.DomainProgram;
 import io.github.gammawright.geometry.FramePlan;
+import io.github.gammawright.geometry.Layout;
 import io.github.gammawright.geometry.MetricGraphBuilder;
 import io.github.gammawright.geometry.Quantity;
 import io.github.gammawright.geometry.Route;
@@ -97,7 +98,7 @@ public final class KernelGenerator {
                 specification.packageName(),
                 specification.className(),
                 List.of(Quantity.CHRISTOFFEL),
-                specification.layout(),
+                Layout.FULL,
                 specification.options());
         List<Candidate> symbols = candidates(definition, ofSymbols, Optional.empty());
         Optimiser.Outcome outcome = optimiser(points, specification.options(), SHARE_OF_SYMBOLS)

@@ -54,10 +54,8 @@ record Candidate(String description, List<List<Boolean>> zero, LoweredProgram pr
                             candidates.get(0).zero(),
                             Lowering.lowerWithValues(forms.target(), found))));
             for (Geometry.Part part : Geometry.Part.values()) {
-                // frames need the author's squares, which the other graph lacks
-                if (framePlan.isEmpty()
-                        && specification.quantities().stream()
-                                .anyMatch(quantity -> quantity.madeOf().equals(Optional.of(part)))) {
+                if (specification.quantities().stream()
+                        .anyMatch(quantity -> quantity.madeOf().equals(Optional.of(part)))) {
                     candidates.addAll(byClosedPart(part, metric, specification));
                 }
             }

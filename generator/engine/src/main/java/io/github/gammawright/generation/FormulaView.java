@@ -3,7 +3,7 @@ package io.github.gammawright.generation;
 import io.github.gammawright.algebra.FormStyle;
 import io.github.gammawright.algebra.NormalForms;
 import io.github.gammawright.definition.MetricDefinition;
-import io.github.gammawright.geometry.DomainSigns;
+import io.github.gammawright.geometry.CommonRoot;
 import io.github.gammawright.geometry.Geometry;
 import io.github.gammawright.geometry.Layout;
 import io.github.gammawright.geometry.MetricGraph;
@@ -11,13 +11,13 @@ import io.github.gammawright.geometry.MetricGraphBuilder;
 import io.github.gammawright.geometry.Quantity;
 import io.github.gammawright.geometry.Route;
 import io.github.gammawright.geometry.Shape;
-import io.github.gammawright.geometry.VolumeElement;
 import io.github.gammawright.graph.ExpressionGraph;
 import io.github.gammawright.graph.Node;
 import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 
 /**
  * The components of a quantity as a reader would write them: the ones that are not zero, symmetric ones once, in closed
@@ -41,34 +41,64 @@ public final class FormulaView {
     private static List<String> build(MetricDefinition definition, Quantity quantity, FormulaPrinter.Form form) {
         Applicability.require(definition, List.of(quantity));
         MetricGraph metric = MetricGraphBuilder.build(definition);
-        Route route = Route.candidates(metric, List.of(quantity)).get(0);
+        List<Route> routes = Route.candidates(metric, List.of(quantity));
+        // of the routes of a split the last makes use of most of what the author wrote
+        Route route = routes.get(quantity.isOfSplit() ? routes.size() - 1 : 0);
         Geometry geometry = new Geometry(metric, route, Applicability.framePlan(definition, List.of(quantity)));
         List<Node> entries = geometry.entries(quantity, Layout.PACKED);
-        NormalForms forms = new NormalForms(metric.graph(), FormStyle.READABLE);
-        ExpressionGraph graph = forms.target();
         ComponentLabels labels = new ComponentLabels(definition.coordinates(), quantity, form);
         Shape shape = quantity.shape(definition.dimension());
-        Map<Node, Node> known = new HashMap<>();
         Map<String, Node> values = new LinkedHashMap<>();
         List<int[]> tuples = shape.independentTuples();
         for (int entry = 0; entry < tuples.size(); entry++) {
             int[] tuple = tuples.get(entry);
             Node component = entries.get(entry);
-            if (!component.isZero()) {
-                Node readable = quantity == Quantity.VOLUME_ELEMENT
-                        ? VolumeElement.of(graph, readable(forms, geometry.determinant()), new DomainSigns(definition))
-                        : known.computeIfAbsent(component, c -> readable(forms, c));
-                values.put(labels.label(asWritten(shape, tuple)), readable);
+            // γ_abc = −γ_bac
+            boolean again = quantity == Quantity.ROTATION_COEFFICIENTS && tuple[0] < tuple[1];
+            if (!component.isZero() && !again) {
+                values.put(labels.label(asWritten(shape, tuple)), component);
             }
         }
         if (values.isEmpty()) {
             return List.of(
                     form == FormulaPrinter.Form.TEXT ? "every component is zero" : "\\text{every component is zero}");
         }
+        List<String> computed = lines(metric.graph(), form, values);
+        List<String> closed = closed(metric, geometry.commonRoot(quantity), form, values);
+        // roots among the author's abbreviations can swell closed forms beyond reading
+        return length(closed) > length(computed) ? computed : closed;
+    }
+
+    private static int length(List<String> lines) {
+        return lines.stream().mapToInt(String::length).sum();
+    }
+
+    private static List<String> lines(ExpressionGraph graph, FormulaPrinter.Form form, Map<String, Node> values) {
         return new FormulaPrinter(graph, form)
                 .lines(values).stream()
                         .map(line -> line.name() + " = " + line.formula())
                         .toList();
+    }
+
+    private static List<String> closed(
+            MetricGraph metric, Optional<CommonRoot> root, FormulaPrinter.Form form, Map<String, Node> values) {
+        NormalForms forms = new NormalForms(metric.graph(), FormStyle.READABLE);
+        Map<Node, Node> known = new HashMap<>();
+        Map<String, Node> closed = new LinkedHashMap<>();
+        values.forEach((label, value) ->
+                closed.put(label, known.computeIfAbsent(value, v -> readable(metric, forms, root, v))));
+        return lines(forms.target(), form, closed);
+    }
+
+    private static Node readable(MetricGraph metric, NormalForms forms, Optional<CommonRoot> root, Node value) {
+        if (root.isEmpty()) {
+            return readable(forms, value);
+        }
+        Node radicand = root.get().radicand();
+        Node plain = root.get().power(metric.graph(), radicand, metric.notNegative());
+        Node rest = metric.graph().divide(value, plain);
+        Node power = root.get().power(forms.target(), readable(forms, radicand), metric.notNegative());
+        return forms.target().multiply(readable(forms, rest), power);
     }
 
     private static Node readable(NormalForms forms, Node value) {

@@ -92,7 +92,7 @@ record Frame(Node[][] vectors, Node[][] covectors, int[] signs) {
         private void single(int k, int sign) {
             Node square = graph.multiple(new BigFraction(sign), rest[k][k]);
             boolean isNormal = k == 0 && sign < 0 && metric.split().isPresent() && left().equals(List.of(0));
-            Node norm = isNormal ? lapse() : PositiveRoot.of(graph, square);
+            Node norm = isNormal ? lapse() : PositiveRoot.of(graph, square, metric.notNegative());
             Node scale = kept(graph.reciprocal(norm));
             signs[k] = sign;
             for (int i = 0; i < n; i++) {
@@ -118,7 +118,7 @@ record Frame(Node[][] vectors, Node[][] covectors, int[] signs) {
             Node authors = metric.split().orElseThrow().lapse();
             return Arrays.stream(graph.realValues(authors)).allMatch(value -> value > 0)
                     ? authors
-                    : PositiveRoot.of(graph, graph.power(authors, 2));
+                    : PositiveRoot.of(graph, graph.power(authors, 2), metric.notNegative());
         }
 
         private void pair(int j, int k) {

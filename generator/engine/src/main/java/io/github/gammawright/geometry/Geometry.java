@@ -136,7 +136,7 @@ public final class Geometry {
      */
     public Optional<Geometry> withForms(Part part, MetricGraph other, Function<Node, Optional<Node>> form) {
         Forms forms = new Forms(other.graph(), form);
-        Geometry changed = new Geometry(other, route);
+        Geometry changed = new Geometry(other, route, framePlan);
         changed.inverse =
                 new ComponentInverse(other.graph(), forms.matrix(inverse().components()), forms.of(determinant()));
         if (part == Part.CURVATURE) {
@@ -186,6 +186,18 @@ public final class Geometry {
             curvature = new Curvature(this);
         }
         return curvature;
+    }
+
+    /** The root in a quantity's components; none where it has none, or has one of the author's. */
+    public Optional<CommonRoot> commonRoot(Quantity quantity) {
+        return switch (quantity) {
+            case VOLUME_ELEMENT, STRESS_SOURCE -> Optional.of(new CommonRoot(determinant(), false, 1));
+            case SPATIAL_VOLUME_ELEMENT -> Optional.of(new CommonRoot(slicing().determinant(), true, 1));
+            case LAPSE, LAPSE_DERIVATIVE -> slicing().lapseSquare().map(square -> new CommonRoot(square, true, 1));
+            case EXTRINSIC_CURVATURE, MEAN_CURVATURE ->
+                slicing().lapseSquare().map(square -> new CommonRoot(square, true, -1));
+            default -> Optional.empty();
+        };
     }
 
     private static void addMatrix(Node[][] matrix, List<Node> components) {
@@ -291,7 +303,7 @@ public final class Geometry {
     /** √|det g|, in the form that was {@link #useVolumeElement given} if one was. */
     private Node volumeElement() {
         if (volumeElement == null) {
-            volumeElement = VolumeElement.of(graph, determinant());
+            volumeElement = VolumeElement.of(graph, determinant(), metric.notNegative());
         }
         return volumeElement;
     }

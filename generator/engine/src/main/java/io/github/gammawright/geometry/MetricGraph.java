@@ -6,6 +6,7 @@ import io.github.gammawright.graph.Symbol;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Predicate;
 import java.util.function.UnaryOperator;
 
 /**
@@ -20,6 +21,7 @@ import java.util.function.UnaryOperator;
  * @param squares the author's line element as a sum of weighted squares of one-forms, where it is one
  * @param split the author's lapse and shift, where the metric was given by them
  * @param coframe the author's orthonormal one-forms, where the metric was given by them
+ * @param notNegative tells of values that they are certainly nowhere negative in the domain
  */
 @SuppressWarnings("ArrayRecordComponent") // the matrix is read by index everywhere and never handed out of the engine
 public record MetricGraph(
@@ -30,10 +32,11 @@ public record MetricGraph(
         List<Symbol> velocities,
         Optional<List<WeightedSquare>> squares,
         Optional<Split> split,
-        Optional<Coframe> coframe) {
+        Optional<Coframe> coframe,
+        Predicate<Node> notNegative) {
 
     /**
-     * The same metric on another graph, without what its author wrote but for the quadratic form.
+     * The same metric on another graph, with what its author wrote.
      *
      * @param copy takes values there
      */
@@ -51,9 +54,21 @@ public record MetricGraph(
                 copied,
                 quadraticForm.map(copy),
                 velocities,
-                Optional.empty(),
-                Optional.empty(),
-                Optional.empty());
+                squares.map(list -> list.stream()
+                        .map(square ->
+                                new WeightedSquare(copy.apply(square.weight()), copies(square.coefficients(), copy)))
+                        .toList()),
+                split.map(given -> new Split(copy.apply(given.lapse()), copies(given.shift(), copy))),
+                coframe.map(given -> new Coframe(
+                        given.signs(),
+                        given.oneForms().stream()
+                                .map(oneForm -> copies(oneForm, copy))
+                                .toList())),
+                notNegative);
+    }
+
+    private static List<Node> copies(List<Node> nodes, UnaryOperator<Node> copy) {
+        return nodes.stream().map(copy).toList();
     }
 
     /** The number of coordinates. */
@@ -86,12 +101,28 @@ public record MetricGraph(
 
     MetricGraph with(Split given) {
         return new MetricGraph(
-                graph, coordinates, components, quadraticForm, velocities, squares, Optional.of(given), coframe);
+                graph,
+                coordinates,
+                components,
+                quadraticForm,
+                velocities,
+                squares,
+                Optional.of(given),
+                coframe,
+                notNegative);
     }
 
     MetricGraph with(Coframe given) {
         return new MetricGraph(
-                graph, coordinates, components, quadraticForm, velocities, squares, split, Optional.of(given));
+                graph,
+                coordinates,
+                components,
+                quadraticForm,
+                velocities,
+                squares,
+                split,
+                Optional.of(given),
+                notNegative);
     }
 
     /** The metric that this one induces where the first coordinate is constant. */
@@ -114,6 +145,7 @@ public record MetricGraph(
                 velocities.subList(1, n),
                 restricted,
                 Optional.empty(),
-                Optional.empty());
+                Optional.empty(),
+                notNegative);
     }
 }

@@ -196,6 +196,14 @@ public final class MetricGraphBuilder {
             }
         }
         return new MetricGraph(
-                graph, scope.coordinates(), g, quadraticForm, velocities, squares, Optional.empty(), Optional.empty());
+                graph,
+                scope.coordinates(),
+                g,
+                quadraticForm,
+                velocities,
+                squares,
+                Optional.empty(),
+                Optional.empty(),
+                new DomainSigns(definition)::isNotNegative);
     }
 }

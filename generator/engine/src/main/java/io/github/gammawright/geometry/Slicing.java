@@ -10,6 +10,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import org.hipparchus.fraction.BigFraction;
 
 /**
@@ -48,7 +49,7 @@ final class Slicing {
             case SHIFT -> shift();
             case SPATIAL_METRIC -> spatial.components(Quantity.METRIC);
             case INVERSE_SPATIAL_METRIC -> spatial.components(Quantity.INVERSE_METRIC);
-            case SPATIAL_VOLUME_ELEMENT -> List.of(PositiveRoot.of(graph, spatial.determinant()));
+            case SPATIAL_VOLUME_ELEMENT -> List.of(PositiveRoot.of(graph, determinant(), metric.notNegative()));
             case SPATIAL_CHRISTOFFEL -> spatial.components(Quantity.CHRISTOFFEL);
             case SPATIAL_METRIC_DERIVATIVE -> spatial.components(Quantity.METRIC_DERIVATIVE);
             case LAPSE_DERIVATIVE -> derivatives(List.of(lapse()));
@@ -63,10 +64,20 @@ final class Slicing {
         if (lapse == null) {
             lapse = metric.split().isPresent()
                     ? positive(metric.split().get().lapse())
-                    : PositiveRoot.of(graph, lapseSquared());
+                    : PositiveRoot.of(graph, lapseSquared(), metric.notNegative());
             graph.keep(lapse);
         }
         return lapse;
+    }
+
+    /** α², where the author gives no α. */
+    Optional<Node> lapseSquare() {
+        return metric.split().isPresent() ? Optional.empty() : Optional.of(lapseSquared());
+    }
+
+    /** det γ. */
+    Node determinant() {
+        return spatial.determinant();
     }
 
     private Node positive(Node authors) {

@@ -22,7 +22,11 @@ public final class VolumeElement {
      * sign its bars.
      */
     public static Node of(ExpressionGraph graph, Node determinant, DomainSigns signs) {
-        return new VolumeElement(graph, signs::isNotNegative).root(determinant);
+        return of(graph, determinant, signs::isNotNegative);
+    }
+
+    static Node of(ExpressionGraph graph, Node determinant, Predicate<Node> notNegative) {
+        return new VolumeElement(graph, notNegative).root(determinant);
     }
 
     /** The same with nothing known of the domain. */

@@ -50,6 +50,28 @@ class SplitViewTest {
     }
 
     @Test
+    void rootsHoldClosedForms() {
+        assertThat(show("kerr", Quantity.LAPSE, TEXT))
+                .last()
+                .isEqualTo("α = sqrt(Sigma*Delta/(Sigma*Delta + 2*M*r*(Delta + 2*M*r)))");
+        assertThat(show("kerr", Quantity.STRESS_SOURCE, TEXT))
+                .hasSize(12)
+                .contains("½ √|g| ∂_r g_{theta theta} = r*Sigma*sin(theta)");
+        assertThat(show("kerr-schild", Quantity.LAPSE, TEXT)).last().isEqualTo("α = sqrt(1/(1 + 2*H))");
+        assertThat(show("kerr-schild", Quantity.SHIFT, TEXT)).last().isEqualTo("β^z = 2*H*lz/(1 + 2*H)");
+    }
+
+    /** The static frame and its connection: Misner, Thorne &amp; Wheeler (1973), from memory. */
+    @Test
+    void framesAreNumberedAndAntisymmetricCoefficientsPrintedOnce() {
+        assertThat(show("schwarzschild", Quantity.ROTATION_COEFFICIENTS, TEXT))
+                .hasSize(4)
+                .contains("γ_(3)(2)(3) = cos(theta)/(r*sin(theta))");
+        assertThat(show("sphere", Quantity.ORTHONORMAL_FRAME, FormulaPrinter.Form.LATEX))
+                .contains("e_{(0)}^{\\theta} = \\frac{1}{R}");
+    }
+
+    @Test
     void theCallersFunctionsStay() {
         assertThat(show("static-star", Quantity.LAPSE_DERIVATIVE, FormulaPrinter.Form.LATEX))
                 .containsExactly("\\partial_{r} \\alpha = \\nu^{(1)} \\mathrm{e}^{\\nu}");

@@ -79,7 +79,7 @@ record Candidate(String description, List<List<Boolean>> zero, LoweredProgram pr
                 Route.Inversion.BLOCKS,
                 Route.Flow.CONTRACTION,
                 part == Geometry.Part.CONNECTION ? Route.Second.CONNECTION : Route.Second.METRIC);
-        ClosedForms forms = new ClosedForms(metric.graph(), AlgebraBudget.quick());
+        ClosedForms forms = new ClosedForms(metric.graph(), AlgebraBudget.normal());
         Optional<Geometry> geometry =
                 new Geometry(metric, contraction).withForms(part, metric.on(forms.target(), forms::copied), forms::of);
         if (geometry.isEmpty()) {

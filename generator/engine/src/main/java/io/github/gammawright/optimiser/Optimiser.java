@@ -227,6 +227,7 @@ public final class Optimiser {
         Resubstitution search = new Resubstitution(network, guard, random.nextLong(), window, MOST_MEMBERS);
         search.run(STEPS_A_ROUND);
         LoweredProgram program = NetworkWriter.write(network);
-        return new Round(state(program, network.totalCost(), parent.start()), (long) STEPS_A_ROUND * Math.max(1, window.length));
+        return new Round(
+                state(program, network.totalCost(), parent.start()), (long) STEPS_A_ROUND * Math.max(1, window.length));
     }
 }

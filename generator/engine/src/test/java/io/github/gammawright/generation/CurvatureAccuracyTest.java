@@ -71,12 +71,9 @@ class CurvatureAccuracyTest {
                     List.of(quantity),
                     layout(quantity),
                     new GenerationOptions(
-                            effort,
-                            GenerationOptions.Trigonometry.MATH,
-                            false,
-                            GenerationOptions.Preference.SPEED));
-            KernelReport report =
-                    check.check(new KernelGenerator().generate(definition, specification).underTest());
+                            effort, GenerationOptions.Trigonometry.MATH, false, GenerationOptions.Preference.SPEED));
+            KernelReport report = check.check(
+                    new KernelGenerator().generate(definition, specification).underTest());
             assertThat(report.verdict())
                     .as(() -> quantity.symbol() + " of " + name + ": " + report)
                     .isEqualTo(KernelReport.Verdict.PASSED);
@@ -99,8 +96,7 @@ class CurvatureAccuracyTest {
         }
         GeneratedClass together = made(definition, bundle);
         assertThat(together.cost().emitted().operations()).isLessThan(apart);
-        KernelReport report = new KernelCheck(
-                        definition, new CheckSettings(12, 4, 1, 50, 1e-10, Double.MAX_VALUE))
+        KernelReport report = new KernelCheck(definition, new CheckSettings(12, 4, 1, 50, 1e-10, Double.MAX_VALUE))
                 .check(together.underTest());
         assertThat(report.verdict()).as(report::toString).isEqualTo(KernelReport.Verdict.PASSED);
     }
@@ -109,7 +105,6 @@ class CurvatureAccuracyTest {
         return new KernelGenerator()
                 .generate(
                         definition,
-                        new KernelSpecification(
-                                "trial", "Trial", quantities, Layout.FULL, GenerationOptions.DEFAULT));
+                        new KernelSpecification("trial", "Trial", quantities, Layout.FULL, GenerationOptions.DEFAULT));
     }
 }

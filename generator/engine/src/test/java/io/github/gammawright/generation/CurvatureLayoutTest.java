@@ -46,7 +46,8 @@ class CurvatureLayoutTest {
                         // pairs A = k(k − 1)/2 + l and B alike, at A(A + 1)/2 + B
                         if (k > l && i > j && (k > i || (k == i && l >= j))) {
                             int a = k * (k - 1) / 2 + l;
-                            assertThat(packed.index("index", k, l, i, j)).isEqualTo(a * (a + 1) / 2 + i * (i - 1) / 2 + j);
+                            assertThat(packed.index("index", k, l, i, j))
+                                    .isEqualTo(a * (a + 1) / 2 + i * (i - 1) / 2 + j);
                         }
                     }
                 }

@@ -121,7 +121,7 @@ public final class KernelGenerator {
     private static long budget(GenerationOptions.Effort effort) {
         return switch (effort) {
             case QUICK -> 3_000_000;
-            case NORMAL -> 30_000_000;
+            case NORMAL -> 16_000_000;
             case THOROUGH -> 300_000_000;
         };
     }

@@ -12,6 +12,11 @@ import org.apache.maven.plugins.annotations.Parameter;
 /** What all goals have in common: how kernels are made, and how failures are reported. */
 abstract class GammawrightMojo extends AbstractMojo {
 
+    static {
+        // the algebra library remarks on its steps at the level that Maven prints; read when its loggers are made
+        System.setProperty("org.slf4j.simpleLogger.log.edu.jas", "warn");
+    }
+
     /**
      * The Java package of the classes. A {@code [[kernel]]} table of a definition may name another for its class.
      */

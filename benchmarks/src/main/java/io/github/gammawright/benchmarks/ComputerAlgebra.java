@@ -1,36 +1,30 @@
 package io.github.gammawright.benchmarks;
 
+import io.github.gammawright.algebra.NumericFormulas;
+import io.github.gammawright.definition.Expression;
+import io.github.gammawright.definition.ExpressionParser;
+import io.github.gammawright.diagnostic.Diagnostics;
+import io.github.gammawright.diagnostic.LocatedText;
+import io.github.gammawright.diagnostic.SourceText;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
-import org.matheclipse.parser.client.ast.ASTNode;
-import org.matheclipse.parser.client.eval.DoubleEvaluator;
-import org.matheclipse.parser.client.eval.DoubleVariable;
+import java.util.List;
 
 /**
- * The twenty closed forms of Kerr's connection, parsed once and then evaluated by Symja's numeric evaluator, its fastest
- * way from a formula to a double. Stored as in {@link ExpertNonZero}.
+ * The twenty closed forms of Kerr's connection, parsed once and then evaluated by the computer algebra system's numeric
+ * evaluator. Stored as in {@link ExpertNonZero}.
  */
 public final class ComputerAlgebra {
 
-    private static final int SYMBOLS = 20;
-
-    private final DoubleEvaluator evaluator = new DoubleEvaluator();
-    private final DoubleVariable r = new DoubleVariable(0);
-    private final DoubleVariable theta = new DoubleVariable(0);
-    private final ASTNode[] formulas = new ASTNode[SYMBOLS];
+    private final NumericFormulas formulas = new NumericFormulas(List.of("M", "a", "r", "theta"), closedForms());
+    private final double[] values = new double[4];
 
     /** Takes the mass and the angular momentum per mass. */
     public ComputerAlgebra(double mass, double spin) {
-        evaluator.defineVariable("M", new DoubleVariable(mass));
-        evaluator.defineVariable("a", new DoubleVariable(spin));
-        evaluator.defineVariable("r", r);
-        evaluator.defineVariable("x", theta);
-        String[] lines = closedForms().split("\n");
-        for (int i = 0; i < SYMBOLS; i++) {
-            formulas[i] = evaluator.parse(lines[i]);
-        }
+        values[0] = mass;
+        values[1] = spin;
     }
 
     /**
@@ -40,18 +34,27 @@ public final class ComputerAlgebra {
      * @param gamma receives the symbols in index order
      */
     public void evaluate(double[] point, double[] gamma) {
-        r.setValue(point[1]);
-        theta.setValue(point[2]);
-        for (int i = 0; i < SYMBOLS; i++) {
-            gamma[i] = evaluator.evaluateNode(formulas[i]);
-        }
+        values[2] = point[1];
+        values[3] = point[2];
+        formulas.evaluate(values, gamma);
     }
 
-    private static String closedForms() {
+    private static List<Expression> closedForms() {
         try (InputStream stream = ComputerAlgebra.class.getResourceAsStream("kerr-closed-forms.txt")) {
-            return new String(stream.readAllBytes(), StandardCharsets.UTF_8);
+            return new String(stream.readAllBytes(), StandardCharsets.UTF_8)
+                    .lines()
+                    .map(ComputerAlgebra::parsed)
+                    .toList();
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }
+    }
+
+    private static Expression parsed(String line) {
+        SourceText source = new SourceText("kerr-closed-forms.txt", line);
+        Diagnostics diagnostics = new Diagnostics(source);
+        return new ExpressionParser(diagnostics)
+                .parse(LocatedText.whole(source))
+                .orElseThrow(() -> new IllegalStateException(line));
     }
 }

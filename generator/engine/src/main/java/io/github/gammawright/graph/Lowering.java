@@ -88,6 +88,18 @@ public final class Lowering {
         return value.negative() ? program.negate(value.number()) : value.number();
     }
 
+    /** The value of a node, where it depends on parameters alone without a sign before a difference. */
+    private int plain(Node node) {
+        Signed value = lower(node);
+        if (value.negative()
+                && graph.isParameterOnly(node)
+                && program.instruction(value.number()) instanceof Instruction.Arithmetic difference
+                && difference.operator() == Instruction.Operator.SUBTRACT) {
+            return program.subtract(difference.right(), difference.left());
+        }
+        return plain(value);
+    }
+
     private Signed lower(Node node) {
         Signed known = lowered.get(node);
         if (known != null) {
@@ -145,7 +157,7 @@ public final class Lowering {
     private Signed call(Node node, RealFunction function, List<Node> arguments) {
         List<Integer> numbers = new ArrayList<>();
         for (Node argument : arguments) {
-            numbers.add(plain(lower(argument)));
+            numbers.add(plain(argument));
         }
         return atom(node, new Instruction.Call(function, numbers));
     }
@@ -282,7 +294,7 @@ public final class Lowering {
     }
 
     private Signed root(Node base, BigInteger numerator, BigInteger denominator) {
-        int radicand = plain(lower(base));
+        int radicand = plain(base);
         boolean named = denominator.equals(BigInteger.TWO)
                 || denominator.equals(BigInteger.valueOf(3))
                 || denominator.equals(BigInteger.valueOf(4));

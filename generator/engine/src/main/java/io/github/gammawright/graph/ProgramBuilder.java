@@ -30,6 +30,11 @@ public final class ProgramBuilder {
         return number;
     }
 
+    /** The instruction with the given number. */
+    Instruction instruction(int number) {
+        return instructions.get(number);
+    }
+
     /** A rational number. */
     public int constant(BigFraction value) {
         return append(new Instruction.Constant(value));

@@ -16,7 +16,7 @@ class DoubleDoubleTest {
     private static final MathContext DIGITS = new MathContext(60, RoundingMode.HALF_EVEN);
 
     /** Sixteen units of the last of the 106 bits. */
-    private static final BigDecimal ALLOWED = new BigDecimal(0x1p-102);
+    private static final BigDecimal ALLOWED = new BigDecimal(Math.scalb(1.0, -102));
 
     private final SplittableRandom random = new SplittableRandom(8);
 

@@ -119,7 +119,8 @@ public final class SourceWriter {
         for (Path name : root.relativize(folder)) {
             step = step.resolve(name);
             if (!Files.isDirectory(step)) {
-                Files.createDirectory(step);
+                // unlike createDirectory content with a folder that another build has made meanwhile
+                Files.createDirectories(step);
             }
             if (!step.toRealPath().startsWith(real)) {
                 throw new OutputException("refused to write into " + step + ": this link leads outside " + root);

@@ -16,6 +16,7 @@ import java.util.Map;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
 import java.util.concurrent.Future;
+import java.util.regex.Pattern;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -25,6 +26,7 @@ import org.junit.jupiter.params.provider.ValueSource;
 class SourceWriterTest {
 
     private static final String PATH = "kernels/lantern/Star.java";
+    private static final int ROUNDS = 40;
 
     @TempDir
     private Path temporary;
@@ -158,7 +160,7 @@ class SourceWriterTest {
         assertThat(actions).isEmpty();
     }
 
-    /** A reader may come at any moment: it must find one of the whole texts. */
+    /** A reader may come at any moment: it must find one of the whole texts. Each round begins without a folder. */
     @Test
     void severalWritersAtOnceLeaveOneWholeText() throws Exception {
         List<String> texts =
@@ -168,9 +170,10 @@ class SourceWriterTest {
             List<Future<?>> writers = new ArrayList<>();
             for (String text : texts) {
                 writers.add(pool.submit(() -> {
-                    for (int i = 0; i < 20; i++) {
-                        new SourceWriter(temporary).writeTexts(texts(PATH, text));
-                        assertThat(texts).contains(Files.readString(temporary.resolve(PATH)));
+                    for (int i = 0; i < ROUNDS; i++) {
+                        Path root = temporary.resolve("round" + i);
+                        new SourceWriter(root).writeTexts(texts(PATH, text));
+                        assertThat(texts).contains(Files.readString(root.resolve(PATH)));
                     }
                     return null;
                 }));
@@ -181,7 +184,9 @@ class SourceWriterTest {
         } finally {
             pool.shutdownNow();
         }
-        assertThat(everything(temporary)).containsExactly(PATH);
+        assertThat(everything(temporary))
+                .hasSize(ROUNDS)
+                .allMatch(file -> file.matches("round\\d+/" + Pattern.quote(PATH)));
     }
 
     private static Map<String, byte[]> texts(String path, String text) {
